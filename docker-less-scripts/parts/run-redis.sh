@@ -52,5 +52,3 @@ stop_redis() {
   as_server_user kill -TERM "$pid"
   wait_until 30 is_gone "$pid" || fail "Redis does not stop; its log is $folder/server.log"
 }
-
-is_gone() { [ ! -e "/proc/$1" ]; }
