@@ -1,3 +1,4 @@
+# shellcheck shell=bash
 # install_debian_packages NAME...: apt, with sudo when needed; packaged services are neither started nor given a cluster.
 
 as_root() { if is_root; then "$@"; else sudo "$@"; fi; }

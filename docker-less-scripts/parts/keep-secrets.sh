@@ -1,3 +1,4 @@
+# shellcheck shell=bash
 # Secrets are made once per data folder and live in files that only their owner reads; never on an argument list.
 
 random_hex() { od -An -N "$1" -tx1 /dev/urandom | tr -d ' \n'; }

@@ -1,3 +1,4 @@
+# shellcheck shell=bash
 # Sourced first by every script here: where things are, how to speak, one start at a time, whose process a pid is.
 set -euo pipefail
 umask 022
@@ -7,7 +8,7 @@ DATA_DIR=${DATA_DIR:-$ROOT/.data}
 case $DATA_DIR in /*) ;; *) DATA_DIR=$PWD/$DATA_DIR ;; esac
 export PATH="$PATH:/usr/sbin:/sbin"
 
-say() { printf '%s\n' "$*"; }
+say() { printf '%s\n' "$@"; }
 
 fail() {
   printf '%s\n' "$@" >&2

@@ -1,3 +1,4 @@
+# shellcheck shell=bash
 # Node.js itself, the JavaScript packages and the build: each only when something changed.
 
 require_node() {

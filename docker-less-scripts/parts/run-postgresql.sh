@@ -1,3 +1,4 @@
+# shellcheck shell=bash
 # A private PostgreSQL: own folder, own port on 127.0.0.1, passwords always, no socket.
 
 # postgresql_folder [MAJOR]: where that version's programs are (the newest when none is named); nothing when not installed.

@@ -1,3 +1,4 @@
+# shellcheck shell=bash
 # The API and the workers as daemons: a pid file and a log each, secrets through the environment alone.
 
 # program_runs NAME SCRIPT: the pid in the file is a node that runs this script for this data folder.
@@ -5,8 +6,8 @@ program_runs() {
   local pid
   pid=$(cat "$DATA_DIR/run/$1.pid" 2>/dev/null || true)
   case $pid in '' | *[!0-9]*) return 1 ;; esac
-  tr '\0' '\n' <"/proc/$pid/cmdline" 2>/dev/null | grep -qxF "$2" &&
-    tr '\0' '\n' <"/proc/$pid/environ" 2>/dev/null | grep -qxF "DATA_DIR=$DATA_DIR"
+  { tr "\0" "\n" <"/proc/$pid/cmdline"; } 2>/dev/null | grep -qxF "$2" &&
+    { tr "\0" "\n" <"/proc/$pid/environ"; } 2>/dev/null | grep -qxF "DATA_DIR=$DATA_DIR"
 }
 
 # What the programs get to know. The database's superuser is not among it.
