@@ -25,6 +25,15 @@ SECRETS
   . "$file"
 }
 
+# One folder under /var/lib for both servers: the one that a link already leads to, or a new one.
+folder_behind_links() {
+  local link
+  for link in "$DATA_DIR/postgresql" "$DATA_DIR/redis"; do
+    [ ! -L "$link" ] || { dirname "$(readlink "$link")"; return; }
+  done
+  printf '%s' "/var/lib/leeside-$(random_hex 6)"
+}
+
 # server_folder NAME: prints the folder of one server's data, making it on first use. Where the server's user cannot
 # reach the data folder (a checkout under /root, a home that is closed), the data lies under /var/lib behind a link.
 server_folder() {
@@ -34,7 +43,7 @@ server_folder() {
       mkdir -m 700 "$folder"
     else
       local home
-      home=/var/lib/leeside-$(random_hex 6)
+      home=$(folder_behind_links)
       mkdir -p "$home/$1"
       chmod 711 "$home"
       chmod 700 "$home/$1"

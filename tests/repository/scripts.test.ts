@@ -1,8 +1,10 @@
 import { spawnSync } from 'node:child_process';
-import { existsSync, mkdirSync, mkdtempSync, readFileSync, readdirSync, rmSync, statSync, symlinkSync, writeFileSync } from 'node:fs';
+import {
+  chmodSync, existsSync, lstatSync, mkdirSync, mkdtempSync, readFileSync, readdirSync, realpathSync, rmSync, statSync, symlinkSync, writeFileSync,
+} from 'node:fs';
 import { createServer } from 'node:net';
 import { tmpdir } from 'node:os';
-import { join } from 'node:path';
+import { dirname, join } from 'node:path';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
 
 const root = join(import.meta.dirname, '../..');
@@ -11,6 +13,8 @@ let folder: string;
 
 beforeEach(() => {
   folder = mkdtempSync(join(tmpdir(), 'scripts-'));
+  // As root the servers run as another user, who must be able to pass through.
+  chmodSync(folder, 0o711);
 });
 afterEach(() => {
   rmSync(folder, { recursive: true });
@@ -67,6 +71,20 @@ describe('services', () => {
       for (const secret of secrets) expect(commands.some((command) => command.includes(secret))).toBe(false);
     } finally {
       services('stop');
+    }
+  });
+
+  it.runIf(process.getuid?.() === 0)('run as root keep the data behind a link where their user cannot reach the folder', () => {
+    chmodSync(folder, 0o700);
+    expect(services('start').status).toBe(0);
+    const behind = dirname(realpathSync(join(folder, 'data/postgresql')));
+    try {
+      expect(lstatSync(join(folder, 'data/redis')).isSymbolicLink()).toBe(true);
+      expect(behind).toMatch(/^\/var\/lib\/leeside-[0-9a-f]{12}$/);
+      expect(readdirSync(behind).sort()).toEqual(['postgresql', 'redis']);
+      expect(services('stop').status).toBe(0);
+    } finally {
+      rmSync(behind, { recursive: true });
     }
   });
 
