@@ -69,6 +69,6 @@ stop_redis() {
   [ -d "$folder" ] || return 0
   pid=$(redis_pid "$folder")
   [ -n "$pid" ] || return 0
-  as_server_user kill -TERM "$pid"
+  as_server_user bash -c 'kill -TERM "$1"' bash "$pid"
   wait_until 30 is_gone "$pid" || fail "Redis does not stop; its log is $folder/server.log"
 }
