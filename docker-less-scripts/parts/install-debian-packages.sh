@@ -37,7 +37,8 @@ if ! command -v pg_ctlcluster >/dev/null; then
   echo 'create_main_cluster = false' >"$cluster_rule"
 fi
 had_redis=$(command -v redis-server || true)
-apt-get -o DPkg::Lock::Timeout=300 update </dev/null
+# A list that cannot be fetched (somebody's own source) matters only if the packages cannot be installed.
+apt-get -o DPkg::Lock::Timeout=300 update </dev/null || true
 apt-get -o DPkg::Lock::Timeout=300 -o Dpkg::Options::=--force-confold install -y --no-install-recommends "$@" </dev/null
 # The packaged Redis is not needed at the next boot: ours is private.
 if [ -z "$had_redis" ] && [ -d /run/systemd/system ]; then systemctl disable --quiet redis-server || true; fi

@@ -32,6 +32,7 @@ launch_program() {
   local log=$DATA_DIR/log/$1.log
   program_runs "$1" "$2" && return 0
   turn_log "$log"
+  printf -- '-- started %s\n' "$(date --iso-8601=seconds)" >>"$log"
   (cd "$ROOT" && exec env -u LEESIDE_LOCK_HELD setsid node "$2") </dev/null >>"$log" 2>&1 8<&- 9>&- &
   echo $! >"$DATA_DIR/run/$1.pid"
   printf '%s\n' "${BUILD_HASH:-}" >"$DATA_DIR/run/$1.build"
@@ -104,9 +105,9 @@ wait_for_page() {
   local round
   for round in $(seq 1 120); do
     page_answers && break
-    program_runs api "$(api_script)" || { show_last_lines "$DATA_DIR/log/api.log"; fail 'The API has ended.' "$1"; }
+    ! is_gone "$(cat "$DATA_DIR/run/api.pid")" || { show_last_lines "$DATA_DIR/log/api.log"; fail 'The API has ended.' "$1"; }
     [ "$round" -lt 120 ] || { show_last_lines "$DATA_DIR/log/api.log"; fail 'The page does not answer.' "$1"; }
     sleep 0.5
   done
-  program_runs worker-1 "$(worker_script)" || { show_last_lines "$DATA_DIR/log/worker-1.log"; fail 'The worker has ended.' "$1"; }
+  wait_until 2 program_runs worker-1 "$(worker_script)" || { show_last_lines "$DATA_DIR/log/worker-1.log"; fail 'The worker has ended.' "$1"; }
 }
