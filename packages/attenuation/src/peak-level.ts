@@ -1,0 +1,12 @@
+import type { Sweep } from '@leeside/trace-reading/sweep';
+
+/**
+ * The highest level of a sweep and where it stands; the first of equals.
+ * @param sweep any sweep.
+ * @returns frequency in Hz, level in the sweep's unit.
+ */
+export function peakOf(sweep: Sweep): { frequencyHz: number; level: number } {
+  let highest = 0;
+  for (let bin = 1; bin < sweep.level.length; bin += 1) if ((sweep.level[bin] ?? 0) > (sweep.level[highest] ?? 0)) highest = bin;
+  return { frequencyHz: sweep.frequencyHz[highest] ?? NaN, level: sweep.level[highest] ?? NaN };
+}
