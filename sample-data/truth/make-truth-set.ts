@@ -9,7 +9,8 @@ import { truthSweepFile } from './truth-sweep-file.js';
 const driftDb = 0.6;
 const bandHz = [3e7, 6e9] as const;
 const spotCarriers = 24;
-const spotSpanHz = 2e6;
+/** Width of a spot sweep in RBW. */
+const spotSpanInRbw = 200;
 /** Bins from one carrier of the comb to the next. */
 const combSpacingBins = 20;
 
@@ -74,16 +75,17 @@ function combSet(options: TruthOptions): TruthSet {
 function spotSet(options: TruthOptions): TruthSet {
   const carriersHz = Float64Array.from({ length: spotCarriers }, (_, carrier) => Math.round(4e7 * (5.5e9 / 4e7) ** (carrier / (spotCarriers - 1))));
   const levels = spreadLevels(carriersHz, options.rbwHz, randomSource(options.seed));
+  const spanHz = spotSpanInRbw * options.rbwHz;
   const files = Array.from(carriersHz).flatMap((carrierHz, order) => {
     const one: TruthLevels = {
       frequencyHz: levels.frequencyHz.slice(order, order + 1), trueAttenuationDb: levels.trueAttenuationDb.slice(order, order + 1),
       referenceLevelDbm: levels.referenceLevelDbm.slice(order, order + 1), enclosedSignalDbm: levels.enclosedSignalDbm.slice(order, order + 1),
       meanNoiseDbm: levels.meanNoiseDbm.slice(order, order + 1),
     };
-    const axisHz = frequencyAxisHz(carrierHz - spotSpanHz / 2, carrierHz + spotSpanHz / 2, options.points);
+    const axisHz = frequencyAxisHz(carrierHz - spanHz / 2, carrierHz + spanHz / 2, options.points);
     return filesOn(options, placedCarriers(options, axisHz, one, `-${(carrierHz / 1e6).toFixed(3)}MHz`), order);
   });
-  return { files, truth: truthOf(options, levels, spotSpanHz / (options.points - 1)) };
+  return { files, truth: truthOf(options, levels, spanHz / (options.points - 1)) };
 }
 
 const makers = { continuous: continuousSet, comb: combSet, spot: spotSet } as const;

@@ -10,6 +10,7 @@ export interface TruthOptions {
   readonly looks: { readonly reference: number; readonly enclosed: number; readonly noise: number };
   readonly combined: 'held' | 'averaged';
   readonly noiseSweep: boolean;
+  /** At most 100 kHz for spots, whose sweeps are 200 RBW wide. */
   readonly rbwHz: number;
   readonly layout: FileLayout;
   /** False: no file tells its settings. */

@@ -23,6 +23,8 @@ export const truthVariants: readonly TruthOptions[] = [
   { ...usual, seed: 301, style: 'spot', points: 601, looks: equal(10), layout: 'preamble' },
   { ...usual, seed: 302, style: 'spot', points: 801, looks: equal(20), layout: 'decimal comma', noiseSweep: false },
   { ...usual, seed: 303, style: 'spot', points: 1001, looks: equal(100), layout: 'UTF-16', rbwHz: 30_000 },
+  { ...usual, seed: 305, style: 'spot', points: 600, looks: equal(10), layout: 'key: value', rbwHz: 3_000 },
+  { ...usual, seed: 306, style: 'spot', points: 600, looks: equal(50), layout: 'levels only', noiseSweep: false, rbwHz: 30_000 },
   { ...usual, seed: 304, style: 'spot', points: 601, looks: equal(10), layout: 'plain', noiseSweep: false, settingsWritten: false },
 ];
 
