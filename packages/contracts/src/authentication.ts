@@ -26,6 +26,14 @@ export const signOut = endpoint({
 export const getMe = endpoint({
   name: 'getMe', method: 'get', path: '/auth/me', summary: 'Who is signed in', access: 'signed in', answers: { 200: signedInSchema },
 });
+/** Only while the lab has no admin; the token comes from the one-time link that `start --empty` prints. */
+export const createFirstAdmin = endpoint({
+  name: 'createFirstAdmin', method: 'post', path: '/auth/first-admin', summary: 'Become the first admin of an empty lab', access: 'public',
+  body: z.strictObject({
+    token: z.string().min(1).max(400), name: shortTextSchema, email: z.email().max(320), password: z.string().min(12).max(1024),
+  }),
+  answers: { 201: signedInSchema },
+});
 
 export const tokenScopeSchema = z.enum(['read', 'write']);
 export const createToken = endpoint({

@@ -1,0 +1,16 @@
+import type { User } from '@leeside/contracts/authentication';
+import { isAllowed, type Permission } from '@leeside/contracts/permissions';
+
+export interface Place { to: string; word: string; needs: Permission }
+
+const places: readonly Place[] = [
+  { to: '/', word: 'Today', needs: 'lab.read' },
+  { to: '/sessions', word: 'Sessions', needs: 'lab.read' },
+  { to: '/samples', word: 'Samples', needs: 'lab.read' },
+  { to: '/requirements', word: 'Requirements', needs: 'lab.read' },
+  { to: '/samples', word: 'Your samples', needs: 'own-sample.read' },
+  { to: '/tokens', word: 'Tokens', needs: 'token.own' },
+];
+
+/** The places on the spine that this person may go to. */
+export const placesFor = (user: User): readonly Place[] => places.filter((place) => isAllowed(user.roles, place.needs));
