@@ -3,7 +3,7 @@ import { makeTruthSet } from './make-truth-set.js';
 import type { Truth, TruthFile, TruthOptions } from './truth-set.js';
 
 const options: TruthOptions = {
-  seed: 1, style: 'continuous', points: 1001, looks: { reference: 10, enclosed: 10, noise: 10 }, combined: 'held',
+  seed: 1, style: 'continuous', points: 1001, referencePoints: 1001, combSpacingBins: 20, quantumDb: 0.01, looks: { reference: 10, enclosed: 10, noise: 10 }, combined: 'held',
   noiseSweep: true, rbwHz: 10_000, layout: 'plain', settingsWritten: true,
 };
 
@@ -37,14 +37,14 @@ describe('makeTruthSet', () => {
   });
 
   it('shows noise alone at its mean power in the RBW', () => {
-    const { files, truth } = makeTruthSet({ ...options, points: 4001, looks: { reference: 1, enclosed: 1, noise: 1 } });
+    const { files, truth } = makeTruthSet({ ...options, points: 4001, referencePoints: 4001, looks: { reference: 1, enclosed: 1, noise: 1 } });
     const ratios = levelsOf(files.find((file) => file.role === 'noise')).map((levelDbm, bin) => 10 ** ((levelDbm - (truth.meanNoiseDbm[bin] ?? 0)) / 10));
     expect(ratios).toHaveLength(4001);
     expect(Math.abs(ratios.reduce((sum, ratio) => sum + ratio, 0) / ratios.length - 1)).toBeLessThan(0.05);
   });
 
   it('shows each comb carrier at its level within two points of its frequency', () => {
-    const { files, truth } = makeTruthSet({ ...options, style: 'comb', points: 2001 });
+    const { files, truth } = makeTruthSet({ ...options, style: 'comb', points: 2001, referencePoints: 2001 });
     const levels = levelsOf(files[0]);
     const stepHz = (6e9 - 3e7) / 2000;
     truth.frequencyHz.forEach((carrierHz, carrier) => {
@@ -56,7 +56,7 @@ describe('makeTruthSet', () => {
   });
 
   it('makes four files for each spot, three without a noise sweep', () => {
-    expect(makeTruthSet({ ...options, style: 'spot', points: 600 }).files).toHaveLength(96);
-    expect(makeTruthSet({ ...options, style: 'spot', points: 600, noiseSweep: false }).files).toHaveLength(72);
+    expect(makeTruthSet({ ...options, style: 'spot', points: 600, referencePoints: 600 }).files).toHaveLength(96);
+    expect(makeTruthSet({ ...options, style: 'spot', points: 600, referencePoints: 600, noiseSweep: false }).files).toHaveLength(72);
   });
 });

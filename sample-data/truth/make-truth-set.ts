@@ -7,47 +7,63 @@ import { truthSweepFile } from './truth-sweep-file.js';
 
 /** The generator drifts by this much between the opening and the closing reference; the enclosed sweep stands in the middle. */
 const driftDb = 0.6;
-const bandHz = [3e7, 6e9] as const;
+const wholeBand: Band = { startHz: 3e7, stopHz: 6e9, label: '', order: 0 };
 const spotCarriers = 24;
 /** Width of a spot sweep in RBW. */
 const spotSpanInRbw = 200;
-/** Bins from one carrier of the comb to the next. */
-const combSpacingBins = 20;
 
-/** One axis, what arrives on it in the open and inside, and the noise. */
-interface Placed {
+/** What one group of sweeps covers. */
+interface Band {
+  readonly startHz: number;
+  readonly stopHz: number;
+  /** Goes into the file names. */
   readonly label: string;
-  readonly axisHz: Float64Array;
+  readonly order: number;
+}
+
+/** What arrives on an axis in the open and inside, and the noise. */
+interface Arriving {
   readonly openDbm: Float64Array;
   readonly insideDbm: Float64Array;
   readonly noiseDbm: Float64Array;
 }
 
-function filesOn(options: TruthOptions, placed: Placed, order: number): TruthFile[] {
-  const { axisHz, noiseDbm, label } = placed;
-  const silence = axisHz.map(() => -Infinity);
-  const drifted = (shiftDb: number): Float64Array => placed.openDbm.map((levelDbm) => levelDbm + shiftDb);
-  const planned = [
-    { name: `reference-opening${label}.csv`, role: 'reference', signalDbm: drifted(-driftDb / 2), minute: 0 },
-    { name: `noise-generator-off${label}.csv`, role: 'noise', signalDbm: silence, minute: 40 },
-    { name: `enclosed${label}.csv`, role: 'enclosed', signalDbm: placed.insideDbm, minute: 80 },
-    { name: `reference-closing${label}.csv`, role: 'reference', signalDbm: drifted(driftDb / 2), minute: 120 },
-  ] as const;
+const planned = [
+  { name: 'reference-opening', role: 'reference', shiftDb: -driftDb / 2, minute: 0 },
+  { name: 'noise-generator-off', role: 'noise', shiftDb: 0, minute: 40 },
+  { name: 'enclosed', role: 'enclosed', shiftDb: 0, minute: 80 },
+  { name: 'reference-closing', role: 'reference', shiftDb: driftDb / 2, minute: 120 },
+] as const;
+
+function signalOf(role: TruthFile['role'], arriving: Arriving, shiftDb: number): Float64Array {
+  if (role === 'noise') return arriving.noiseDbm.map(() => -Infinity);
+  return role === 'enclosed' ? arriving.insideDbm : arriving.openDbm.map((levelDbm) => levelDbm + shiftDb);
+}
+
+function filesOf(options: TruthOptions, band: Band, arrivingOn: (axisHz: Float64Array) => Arriving): TruthFile[] {
   return planned
     .filter((sweep) => options.noiseSweep || sweep.role !== 'noise')
-    .map((sweep, part) => truthSweepFile(options, { ...sweep, minute: sweep.minute + order, axisHz, noiseDbm, seed: options.seed * 1000 + order * 10 + part }));
+    .map(({ name, role, shiftDb, minute }, part) => {
+      const axisHz = frequencyAxisHz(band.startHz, band.stopHz, role === 'reference' ? options.referencePoints : options.points);
+      const arriving = arrivingOn(axisHz);
+      return truthSweepFile(options, {
+        name: `${name}${band.label}.csv`, role, axisHz, signalDbm: signalOf(role, arriving, shiftDb), noiseDbm: arriving.noiseDbm,
+        minute: minute + band.order, seed: options.seed * 1000 + band.order * 10 + part,
+      });
+    });
 }
 
-function placedCarriers(options: TruthOptions, axisHz: Float64Array, levels: TruthLevels, label: string): Placed {
-  const seen = (levelDbm: Float64Array): Float64Array => carrierResponseDbm({ frequencyHz: levels.frequencyHz, levelDbm }, axisHz, options.rbwHz);
-  const noiseDbm = axisHz.map((atHz) => {
-    const next = levels.frequencyHz.findIndex((carrierHz) => carrierHz >= atHz);
-    return levels.meanNoiseDbm.at(next) ?? 0;
-  });
-  return { label, axisHz, openDbm: seen(levels.referenceLevelDbm), insideDbm: seen(levels.enclosedSignalDbm), noiseDbm };
+/** Carriers through the RBW, and the noise as it is at the next carrier. */
+function carriersOn(options: TruthOptions, levels: TruthLevels): (axisHz: Float64Array) => Arriving {
+  return (axisHz) => {
+    const seen = (levelDbm: Float64Array): Float64Array => carrierResponseDbm({ frequencyHz: levels.frequencyHz, levelDbm }, axisHz, options.rbwHz);
+    const noiseDbm = axisHz.map((atHz) => levels.meanNoiseDbm.at(levels.frequencyHz.findIndex((carrierHz) => carrierHz >= atHz)) ?? 0);
+    return { openDbm: seen(levels.referenceLevelDbm), insideDbm: seen(levels.enclosedSignalDbm), noiseDbm };
+  };
 }
 
-function truthOf(options: TruthOptions, levels: TruthLevels, stepHz: number): TruthSet['truth'] {
+function truthOf(options: TruthOptions, levels: TruthLevels, spanHz: number): TruthSet['truth'] {
+  const stepHz = spanHz / (Math.min(options.points, options.referencePoints) - 1);
   return {
     ...levels, style: options.style,
     toleranceHz: options.style === 'continuous' ? 0.6 * stepHz : Math.max(options.rbwHz, 2 * stepHz) + stepHz,
@@ -57,35 +73,40 @@ function truthOf(options: TruthOptions, levels: TruthLevels, stepHz: number): Tr
 }
 
 function continuousSet(options: TruthOptions): TruthSet {
-  const axisHz = frequencyAxisHz(...bandHz, options.points);
-  const levels = withWeakReference(swingingLevels(axisHz, options.rbwHz));
-  const placed = { label: '', axisHz, openDbm: levels.referenceLevelDbm, insideDbm: levels.enclosedSignalDbm, noiseDbm: levels.meanNoiseDbm };
-  return { files: filesOn(options, placed, 0), truth: truthOf(options, levels, (axisHz[1] ?? 0) - (axisHz[0] ?? 0)) };
+  const levelsOn = (axisHz: Float64Array): TruthLevels => withWeakReference(swingingLevels(axisHz, options.rbwHz));
+  const files = filesOf(options, wholeBand, (axisHz) => {
+    const levels = levelsOn(axisHz);
+    return { openDbm: levels.referenceLevelDbm, insideDbm: levels.enclosedSignalDbm, noiseDbm: levels.meanNoiseDbm };
+  });
+  const { startHz, stopHz } = wholeBand;
+  return { files, truth: truthOf(options, levelsOn(frequencyAxisHz(startHz, stopHz, options.points)), stopHz - startHz) };
 }
 
 function combSet(options: TruthOptions): TruthSet {
-  const axisHz = frequencyAxisHz(...bandHz, options.points);
-  const stepHz = (bandHz[1] - bandHz[0]) / (options.points - 1);
-  const count = Math.floor((options.points - 1) / combSpacingBins);
-  const carriersHz = Float64Array.from({ length: count }, (_, carrier) => Math.round(bandHz[0] + (combSpacingBins * (carrier + 0.5) + 0.3) * stepHz));
+  const { startHz, stopHz } = wholeBand;
+  const stepHz = (stopHz - startHz) / (options.points - 1);
+  const count = Math.floor((options.points - 1) / options.combSpacingBins);
+  const carriersHz = Float64Array.from({ length: count }, (_, carrier) => Math.round(startHz + (options.combSpacingBins * (carrier + 0.5) + 0.3) * stepHz));
   const levels = spreadLevels(carriersHz, options.rbwHz, randomSource(options.seed));
-  return { files: filesOn(options, placedCarriers(options, axisHz, levels, ''), 0), truth: truthOf(options, levels, stepHz) };
+  return { files: filesOf(options, wholeBand, carriersOn(options, levels)), truth: truthOf(options, levels, stopHz - startHz) };
 }
+
+/** The levels of one carrier of many. */
+const oneOf = (levels: TruthLevels, at: number): TruthLevels => ({
+  frequencyHz: levels.frequencyHz.slice(at, at + 1), trueAttenuationDb: levels.trueAttenuationDb.slice(at, at + 1),
+  referenceLevelDbm: levels.referenceLevelDbm.slice(at, at + 1), enclosedSignalDbm: levels.enclosedSignalDbm.slice(at, at + 1),
+  meanNoiseDbm: levels.meanNoiseDbm.slice(at, at + 1),
+});
 
 function spotSet(options: TruthOptions): TruthSet {
   const carriersHz = Float64Array.from({ length: spotCarriers }, (_, carrier) => Math.round(4e7 * (5.5e9 / 4e7) ** (carrier / (spotCarriers - 1))));
   const levels = spreadLevels(carriersHz, options.rbwHz, randomSource(options.seed));
   const spanHz = spotSpanInRbw * options.rbwHz;
   const files = Array.from(carriersHz).flatMap((carrierHz, order) => {
-    const one: TruthLevels = {
-      frequencyHz: levels.frequencyHz.slice(order, order + 1), trueAttenuationDb: levels.trueAttenuationDb.slice(order, order + 1),
-      referenceLevelDbm: levels.referenceLevelDbm.slice(order, order + 1), enclosedSignalDbm: levels.enclosedSignalDbm.slice(order, order + 1),
-      meanNoiseDbm: levels.meanNoiseDbm.slice(order, order + 1),
-    };
-    const axisHz = frequencyAxisHz(carrierHz - spanHz / 2, carrierHz + spanHz / 2, options.points);
-    return filesOn(options, placedCarriers(options, axisHz, one, `-${(carrierHz / 1e6).toFixed(3)}MHz`), order);
+    const band = { startHz: carrierHz - spanHz / 2, stopHz: carrierHz + spanHz / 2, label: `-${(carrierHz / 1e6).toFixed(3)}MHz`, order };
+    return filesOf(options, band, carriersOn(options, oneOf(levels, order)));
   });
-  return { files, truth: truthOf(options, levels, spanHz / (options.points - 1)) };
+  return { files, truth: truthOf(options, levels, spanHz) };
 }
 
 const makers = { continuous: continuousSet, comb: combSet, spot: spotSet } as const;

@@ -40,10 +40,13 @@ export function swingingLevels(frequencyHz: Float64Array, rbwHz: number): TruthL
 
 /** A notch in the transmit chain, one part in seventy of the band wide, where the reference itself all but drowns. */
 export function withWeakReference(levels: TruthLevels): TruthLevels {
-  const from = Math.round(levels.frequencyHz.length * 0.6);
-  const to = from + Math.ceil(levels.frequencyHz.length / 70);
-  const lossDb = levels.frequencyHz.map((_, point) => (point < from || point >= to ? 0
-    : (levels.referenceLevelDbm[point] ?? 0) - (levels.meanNoiseDbm[point] ?? 0) - 6));
+  const startHz = levels.frequencyHz[0] ?? 0;
+  const bandHz = (levels.frequencyHz.at(-1) ?? 0) - startHz;
+  const lossDb = levels.frequencyHz.map((atHz, point) => {
+    const share = (atHz - startHz) / bandHz;
+    if (share < 0.6 || share > 0.6 + 1 / 70) return 0;
+    return (levels.referenceLevelDbm[point] ?? 0) - (levels.meanNoiseDbm[point] ?? 0) - 6;
+  });
   return {
     ...levels,
     referenceLevelDbm: levels.referenceLevelDbm.map((levelDbm, point) => levelDbm - (lossDb[point] ?? 0)),

@@ -4,8 +4,14 @@ import type { FileLayout } from '../writing/trace-bytes.js';
 export interface TruthOptions {
   readonly seed: number;
   readonly style: 'continuous' | 'comb' | 'spot';
-  /** Points of each sweep, 600 to 4001. */
+  /** Points of each sweep inside and of noise, 600 to 4001. */
   readonly points: number;
+  /** Points of each reference over the same band. */
+  readonly referencePoints: number;
+  /** Bins from one carrier of a comb to the next; nothing to other styles. */
+  readonly combSpacingBins: number;
+  /** Steps in which levels are written, dB. */
+  readonly quantumDb: number;
   /** Sweeps held (or averaged) in each role. */
   readonly looks: { readonly reference: number; readonly enclosed: number; readonly noise: number };
   readonly combined: 'held' | 'averaged';

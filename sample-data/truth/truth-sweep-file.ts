@@ -28,7 +28,7 @@ const twoDigits = (value: number): string => value.toString().padStart(2, '0');
 export function truthSweepFile(options: TruthOptions, sweep: TruthSweep): TruthFile {
   const looks = options.looks[sweep.role];
   const levelDbm = simulateSweep(
-    { signalDbm: sweep.signalDbm, noiseDbm: sweep.noiseDbm, looks, combined: options.combined, quantumDb: 0.01 },
+    { signalDbm: sweep.signalDbm, noiseDbm: sweep.noiseDbm, looks, combined: options.combined, quantumDb: options.quantumDb },
     randomSource(sweep.seed),
   );
   const takenAt = `2026-11-10T${twoDigits(9 + Math.floor(sweep.minute / 60))}:${twoDigits(sweep.minute % 60)}:00`;
