@@ -24,7 +24,7 @@ export const boxDay: BenchDay = {
     rbwHz: 30_000, vbwHz: 100_000, detector: 'Positive Peak', traceMode: 'Max Hold', held: 10, inputAttenuationDb: 0, referenceLevelDbm: 0,
   },
   receiver: { noiseFigureDb: 21, inputAttenuationDb: 0, noiseSlopeDbPerSixGigahertz: 6 },
-  chain: { levelDbm: -16, cableLossDbAtGigahertz: 8, antennaCornerHz: 6e7, rippleDb: 0.8, ripplePeriodHz: 1.4e8 },
+  chain: { levelDbm: -30, cableLossDbAtGigahertz: 8, antennaCornerHz: 6e7, rippleDb: 0.8, ripplePeriodHz: 1.4e8 },
   carrierStepHz: 6e7, sweeps,
 };
 

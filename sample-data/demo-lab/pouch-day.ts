@@ -32,6 +32,6 @@ export const pouchDay: BenchDay = {
     rbwHz: 10_000, vbwHz: 30_000, detector: 'Positive Peak', traceMode: 'Max Hold', held: 20, inputAttenuationDb: 0, referenceLevelDbm: 0,
   },
   receiver: { noiseFigureDb: 21, inputAttenuationDb: 0, noiseSlopeDbPerSixGigahertz: 6 },
-  chain: { levelDbm: -12, cableLossDbAtGigahertz: 7, antennaCornerHz: 6e7, rippleDb: 1.2, ripplePeriodHz: 1.1e8 },
+  chain: { levelDbm: -30, cableLossDbAtGigahertz: 7, antennaCornerHz: 6e7, rippleDb: 1.2, ripplePeriodHz: 1.1e8 },
   carrierStepHz: null, sweeps,
 };
