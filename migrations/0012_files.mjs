@@ -10,7 +10,6 @@ export async function up(knex) {
       byte_count bigint not null,
       state text not null default 'waiting' check (state in ('waiting', 'reading', 'read', 'needs answer', 'refused')),
       attempt integer not null default 0,
-      crashes integer not null default 0,
       heartbeat_at timestamptz not null default now(),
       upload_order bigint generated always as identity,
       fields jsonb not null default '{}',

@@ -8,7 +8,6 @@ export interface ClaimedFile {
   readonly sha256: string;
   readonly byteCount: number;
   readonly attempt: number;
-  readonly crashes: number;
   readonly fields: UploadFields;
   readonly answers: { questionId: string; choiceId: string }[];
   readonly impedanceOhm: number;
@@ -20,7 +19,6 @@ interface ClaimedRow {
   sha256: string;
   byte_count: number;
   attempt: number;
-  crashes: number;
   fields: UploadFields;
   answers: { questionId: string; choiceId: string }[];
   impedance_ohm: number;
@@ -30,19 +28,18 @@ interface ClaimedRow {
 export const staleAfterSeconds = 15;
 
 /**
- * Claims files that wait, or whose reader died, by compare-and-set: each goes to one worker. A file that was being read when its worker
- * died counts a crash.
+ * Claims files that wait, or whose reader died, by compare-and-set: each goes to one worker.
  */
 export async function claimFiles(db: Database, labId: string, fileIds: readonly string[]): Promise<ClaimedFile[]> {
   const { rows }: { rows: ClaimedRow[] } = await db.raw(`
     with claimed as (
-      update files set crashes = crashes + (state = 'reading')::int, state = 'reading', attempt = attempt + 1, heartbeat_at = now()
+      update files set state = 'reading', attempt = attempt + 1, heartbeat_at = now()
       where lab_id = ? and id = any(?::uuid[])
         and (state = 'waiting' or (state = 'reading' and heartbeat_at < now() - make_interval(secs => ?)))
       returning *)
     select claimed.*, sessions.impedance_ohm from claimed join sessions on sessions.id = claimed.session_id order by upload_order`, [labId, [...fileIds], staleAfterSeconds]);
   return rows.map((row) => ({
-    id: row.id, name: row.name, sha256: row.sha256, byteCount: Number(row.byte_count), attempt: row.attempt, crashes: row.crashes, fields: row.fields, answers: row.answers, impedanceOhm: row.impedance_ohm,
+    id: row.id, name: row.name, sha256: row.sha256, byteCount: Number(row.byte_count), attempt: row.attempt, fields: row.fields, answers: row.answers, impedanceOhm: row.impedance_ohm,
   }));
 }
 

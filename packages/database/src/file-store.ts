@@ -101,7 +101,7 @@ const canBeReadAgain: readonly FileState[] = ['refused', 'needs answer', 'read']
  */
 export async function readFileAgain(trx: Database, labId: string, id: string, answers?: readonly { questionId: string; choiceId: string }[]): Promise<string | null> {
   const [row]: { session_id: string }[] = await trx('files').where({ id, lab_id: labId }).whereIn('state', [...canBeReadAgain])
-    .update({ state: 'waiting', crashes: 0, problem: null, questions: null, heartbeat_at: trx.fn.now(), ...(answers === undefined ? {} : { answers: JSON.stringify(answers) }) }).returning('session_id');
+    .update({ state: 'waiting', problem: null, questions: null, heartbeat_at: trx.fn.now(), ...(answers === undefined ? {} : { answers: JSON.stringify(answers) }) }).returning('session_id');
   if (!row) return null;
   await trx('outbox').insert({ lab_id: labId, kind: 'read-files', session_id: row.session_id, file_id: id });
   return row.session_id;

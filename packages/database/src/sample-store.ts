@@ -79,3 +79,8 @@ export async function belongsToLab(db: Database, table: 'samples' | 'lots' | 'de
   const row: unknown = await db(table).where({ id, lab_id: labId }).first('id');
   return row !== undefined;
 }
+
+/** A sample that has a curve is measured, unless somebody has said more of it already. */
+export async function markSampleMeasured(trx: Database, labId: string, id: string): Promise<void> {
+  await trx('samples').where({ id, lab_id: labId }).whereIn('state', ['received', 'on the bench']).update({ state: 'measured' });
+}
