@@ -1,6 +1,7 @@
 import { z } from 'zod';
+import { curveSummarySchema } from './curves.js';
 import { endpoint } from './endpoint.js';
-import { idParamsSchema, idSchema, noteSchema, pageOf, pageQuerySchema, shortTextSchema, timeSchema } from './field-schemas.js';
+import { idParamsSchema, idSchema, listOf, noteSchema, pageOf, pageQuerySchema, shortTextSchema, timeSchema } from './field-schemas.js';
 
 export const sampleStates = ['received', 'on the bench', 'measured', 'released', 'held', 'returned'] as const;
 
@@ -27,4 +28,8 @@ export const listSamples = endpoint({
 export const getSample = endpoint({
   name: 'getSample', method: 'get', path: '/samples/{id}', summary: 'One sample', access: ['lab.read', 'own-sample.read'],
   params: idParamsSchema, answers: { 200: sampleSchema },
+});
+export const listSampleCurves = endpoint({
+  name: 'listSampleCurves', method: 'get', path: '/samples/{id}/curves', summary: 'The curves of a sample, the latest session first', access: 'lab.read',
+  params: idParamsSchema, answers: { 200: listOf(curveSummarySchema) },
 });

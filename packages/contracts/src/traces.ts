@@ -11,7 +11,7 @@ export const traceSchema = z.object({
   condition: z.string(), polarisation: z.string(), position: z.string(), measuredAt: timeSchema.nullable(),
   chainLossDb: z.number().nullable(), transmitLevelDbm: z.number().nullable(), pairedWith: idSchema.nullable(),
   pointCount: z.number().int(), startHz: z.number(), stopHz: z.number(), levelUnit: z.enum(keptLevelUnits), settings: sweepSettingsSchema,
-  peak: z.object({ frequencyHz: z.number(), level: z.number() }), style: sweepStyleSchema.optional(), setAside: z.string().optional(),
+  peak: z.object({ frequencyHz: z.number(), level: z.number() }), style: sweepStyleSchema.optional(), setAside: z.string().optional(), version: z.number().int(),
 });
 export type Trace = z.infer<typeof traceSchema>;
 

@@ -69,3 +69,9 @@ export async function createPerson(db: Database, person: NewPerson): Promise<str
 export async function changePasswordHash(db: Database, personId: string, passwordHash: string): Promise<void> {
   await db('people').where({ id: personId }).update({ password_hash: passwordHash });
 }
+
+/** Whether a lab has an administrator yet. */
+export async function hasAdmin(db: Database, labId: string): Promise<boolean> {
+  const row: unknown = await db('person_roles').where({ lab_id: labId, role: 'admin' }).first('person_id');
+  return row !== undefined;
+}

@@ -34,8 +34,8 @@ interface TraceRow {
   place_in_file: number;
 }
 
-/** A trace with what decides its order and its version. */
-export type KeptTrace = Trace & { readonly version: number; readonly uploadOrder: number };
+/** A trace with what decides its order. */
+export type KeptTrace = Trace & { readonly uploadOrder: number };
 
 const traceOf = (row: TraceRow): KeptTrace => ({
   id: row.id, sessionId: row.session_id, fileId: row.file_id, name: row.name, fileName: row.file_name, role: row.role, roleGuessed: row.role_guessed, sampleId: row.sample_id,
