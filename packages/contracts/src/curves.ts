@@ -51,10 +51,6 @@ export const listCurves = endpoint({
   name: 'listCurves', method: 'get', path: '/sessions/{id}/curves', summary: 'The curves of a session', access: 'lab.read',
   params: idParamsSchema, answers: { 200: listOf(curveSummarySchema) },
 });
-export const listSampleCurves = endpoint({
-  name: 'listSampleCurves', method: 'get', path: '/samples/{id}/curves', summary: 'The curves of a sample over all sessions, newest first', access: 'lab.read',
-  params: idParamsSchema, answers: { 200: listOf(curveSummarySchema) },
-});
 export const getCurve = endpoint({
   name: 'getCurve', method: 'get', path: '/curves/{id}', summary: 'One curve with its bands, gaps and inputs', access: 'lab.read',
   params: idParamsSchema, answers: { 200: curveSchema },
