@@ -1,4 +1,4 @@
-import type { InputHTMLAttributes, ReactNode, SelectHTMLAttributes, TextareaHTMLAttributes } from 'react';
+import type { ComponentProps, ReactNode } from 'react';
 
 interface FrameProps { id: string; label: string; hint?: ReactNode; error?: string | undefined; unit?: string; optional?: boolean; children: ReactNode }
 
@@ -26,7 +26,7 @@ const describedBy = ({ id, hint, error }: Told): string | undefined =>
 
 type Common = Omit<FrameProps, 'children'>;
 
-export function TextField({ id, label, hint, error, unit, optional, className = '', ...rest }: Common & InputHTMLAttributes<HTMLInputElement>) {
+export function TextField({ id, label, hint, error, unit, optional, className = '', ...rest }: Common & ComponentProps<'input'>) {
   return (
     <FieldFrame {...{ id, label, hint, error, ...(unit ? { unit } : {}), ...(optional ? { optional } : {}) }}>
       <input id={id} className={`field ${className}`} aria-invalid={Boolean(error)} aria-describedby={describedBy({ id, hint, error })} {...rest} />
@@ -34,7 +34,7 @@ export function TextField({ id, label, hint, error, unit, optional, className = 
   );
 }
 
-export function TextArea({ id, label, hint, error, optional, ...rest }: Common & TextareaHTMLAttributes<HTMLTextAreaElement>) {
+export function TextArea({ id, label, hint, error, optional, ...rest }: Common & ComponentProps<'textarea'>) {
   return (
     <FieldFrame {...{ id, label, hint, error, ...(optional ? { optional } : {}) }}>
       <textarea id={id} rows={4} className="field" aria-invalid={Boolean(error)} aria-describedby={describedBy({ id, hint, error })} {...rest} />
@@ -42,7 +42,7 @@ export function TextArea({ id, label, hint, error, optional, ...rest }: Common &
   );
 }
 
-export function SelectField({ id, label, hint, error, optional, children, ...rest }: Common & SelectHTMLAttributes<HTMLSelectElement>) {
+export function SelectField({ id, label, hint, error, optional, children, ...rest }: Common & ComponentProps<'select'>) {
   return (
     <FieldFrame {...{ id, label, hint, error, ...(optional ? { optional } : {}) }}>
       <select id={id} className="field" aria-invalid={Boolean(error)} aria-describedby={describedBy({ id, hint, error })} {...rest}>

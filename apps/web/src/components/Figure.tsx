@@ -1,5 +1,6 @@
-import { formatAttenuation, formatFrequency, formatLevel } from '@leeside/units/format-quantity';
+import { formatFrequency, formatLevel } from '@leeside/units/format-quantity';
 import { readerLocale, shownUnit } from './reader-locale';
+import { shownAttenuation } from './shown-attenuation';
 
 /** A frequency as an engineer writes it, the exact hertz in the tooltip. */
 export function Frequency({ hz }: { hz: number }) {
@@ -11,7 +12,7 @@ export function FrequencyRange({ fromHz, toHz }: { fromHz: number; toHz: number 
 }
 
 export function Attenuation({ db, atLeast, decimals = 1 }: { db: number; atLeast: boolean; decimals?: number }) {
-  const text = formatAttenuation(db, atLeast, decimals, readerLocale());
+  const text = shownAttenuation(db, atLeast, readerLocale(), decimals);
   return <data className="figure" value={db} title={atLeast ? `at least ${String(db)} dB` : `${String(db)} dB`}>{text}</data>;
 }
 

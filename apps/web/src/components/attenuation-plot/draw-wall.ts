@@ -1,0 +1,53 @@
+import { clipped } from '../plot/clipped';
+import type { PlotColours } from '../plot/plot-colours';
+import type { PlotInstance } from '../plot/plot-instance';
+import { wallTop, type Segment, type WallPoint } from './requirement-wall';
+
+const hatchStepPx = 8;
+
+function wallPath(plot: PlotInstance, top: readonly WallPoint[], closed: boolean): Path2D {
+  const path = new Path2D();
+  const bottom = plot.bbox.top + plot.bbox.height;
+  top.forEach(({ hz, db }, at) => {
+    const x = plot.valToPos(hz, 'x', true);
+    const y = plot.valToPos(db, 'y', true);
+    if (at === 0 && closed) path.moveTo(x, bottom);
+    if (at === 0 && !closed) path.moveTo(x, y);
+    else path.lineTo(x, y);
+    if (at === top.length - 1 && closed) path.lineTo(x, bottom);
+  });
+  if (closed) path.closePath();
+  return path;
+}
+
+function hatch(plot: PlotInstance, ctx: CanvasRenderingContext2D, stepPx: number): void {
+  const { left, top, width, height } = plot.bbox;
+  ctx.beginPath();
+  for (let x = left - height; x < left + width; x += stepPx) {
+    ctx.moveTo(x, top + height);
+    ctx.lineTo(x + height, top);
+  }
+  ctx.stroke();
+}
+
+/** The requirement: a hatched wall rising from below, over which the curve must stay. */
+export function drawWall(plot: PlotInstance, segments: readonly Segment[], colours: PlotColours): void {
+  const { min, max } = plot.scales.x ?? {};
+  if (min === undefined || max === undefined) return;
+  clipped(plot, (ctx, ratio) => {
+    for (const segment of segments) {
+      const top = wallTop(segment, { fromHz: min, toHz: max });
+      if (!top) continue;
+      ctx.save();
+      ctx.clip(wallPath(plot, top, true));
+      ctx.strokeStyle = colours.edge;
+      ctx.globalAlpha = 0.55;
+      ctx.lineWidth = ratio;
+      hatch(plot, ctx, hatchStepPx * ratio);
+      ctx.restore();
+      ctx.strokeStyle = colours.faded;
+      ctx.lineWidth = 2 * ratio;
+      ctx.stroke(wallPath(plot, top, false));
+    }
+  });
+}

@@ -1,0 +1,1 @@
+export { CurvePage as Component } from '../features/curves/CurvePage';

@@ -1,0 +1,1 @@
+export { FilePage as Component } from '../features/files/FilePage';

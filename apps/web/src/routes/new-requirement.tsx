@@ -1,0 +1,1 @@
+export { NewRequirementPage as Component } from '../features/requirements/NewRequirementPage';

@@ -1,0 +1,1 @@
+export { NewSamplePage as Component } from '../features/samples/NewSamplePage';

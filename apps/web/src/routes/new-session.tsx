@@ -1,0 +1,1 @@
+export { NewSessionPage as Component } from '../features/sessions/NewSessionPage';

@@ -1,0 +1,1 @@
+export { RequirementPage as Component } from '../features/requirements/RequirementPage';

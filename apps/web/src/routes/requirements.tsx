@@ -1,0 +1,1 @@
+export { RequirementsPage as Component } from '../features/requirements/RequirementsPage';

@@ -1,0 +1,1 @@
+export { SamplePage as Component } from '../features/samples/SamplePage';

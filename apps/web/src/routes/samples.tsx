@@ -1,0 +1,1 @@
+export { SamplesPage as Component } from '../features/samples/SamplesPage';

@@ -1,0 +1,1 @@
+export { SessionPage as Component } from '../features/sessions/SessionPage';

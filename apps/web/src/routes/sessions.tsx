@@ -1,0 +1,1 @@
+export { SessionsPage as Component } from '../features/sessions/SessionsPage';

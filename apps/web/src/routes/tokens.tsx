@@ -1,0 +1,1 @@
+export { TokensPage as Component } from '../features/tokens/TokensPage';
