@@ -31,7 +31,7 @@ const payloadSchemas = { 'read-files': readFilesJobSchema, 'compute-curves': com
 export function openJobQueue({ redisUrl, onError }: { redisUrl: string; onError: (fault: Error) => void }): JobQueue {
   const connection = openFailFastRedis(redisUrl, onError);
   const queues = new Map(jobKinds.map((kind) => {
-    const queue = new Queue(kind, { connection, skipWaitingForReady: true, streams: { events: { maxLen: 1000 } } });
+    const queue = new Queue(kind, { connection, skipWaitingForReady: true, skipVersionCheck: true, streams: { events: { maxLen: 1000 } } });
     queue.on('error', onError);
     return [kind, queue];
   }));

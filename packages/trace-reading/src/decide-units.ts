@@ -1,0 +1,139 @@
+import { hertzPerUnit, type FrequencyUnit } from '@leeside/units/frequency-unit';
+import { formatFrequency } from '@leeside/units/format-quantity';
+import { ask, decide, doubt, type Notebook } from './notebook.js';
+import { entryOf, type Preamble } from './preamble.js';
+import { levelValue } from './quantity.js';
+import type { StatedRange } from './stated-range.js';
+import { frequencyUnitIn, frequencyUnitOf, levelUnitIn, type DeclaredLevelUnit } from './unit-words.js';
+
+/** Where a unit was found, and what it is. */
+interface Found<Unit> {
+  readonly unit: Unit;
+  readonly how: string;
+}
+
+export interface RowsShown {
+  readonly lines: readonly number[];
+  readonly frequency: readonly number[];
+  readonly level: readonly number[];
+}
+
+function askConflict<Unit extends string>(notebook: Notebook, id: string, found: readonly Found<Unit>[], rows: RowsShown, show: (unit: Unit) => string): Found<Unit> {
+  const distinct = found.filter((one, at) => found.findIndex((other) => other.unit === one.unit) === at);
+  if (distinct.length === 1 && distinct[0]) return distinct[0];
+  const unit = ask(notebook, {
+    id, code: 'unit-conflict', message: `The file names two units: ${distinct.map((one) => `${one.unit} (${one.how})`).join(' and ')}.`, lines: rows.lines,
+    choices: distinct.map((one) => ({ id: one.unit, label: one.unit, sample: show(one.unit) })),
+  });
+  return { unit, how: 'a person\u2019s answer' };
+}
+
+const rangeTolerance = 0.02;
+
+/** The one unit in which first and last value of the column are start and stop of the preamble. */
+function unitByRange(values: readonly number[], range: StatedRange | null, stepCount: number): Found<FrequencyUnit> | null {
+  const [first, last] = [values[0] ?? NaN, values.at(-1) ?? NaN];
+  if (range === null || range.unit === null || Number.isNaN(range.stopHz)) return null;
+  const slackHz = Math.max(rangeTolerance * (range.stopHz - range.startHz), (2 * (range.stopHz - range.startHz)) / Math.max(stepCount, 1));
+  const fitting = (['Hz', 'kHz', 'MHz', 'GHz'] as const).filter((unit) => Math.abs(Math.max(first, last) * hertzPerUnit[unit] - range.stopHz) <= slackHz && Math.abs(Math.min(first, last) * hertzPerUnit[unit] - range.startHz) <= slackHz);
+  return fitting.length === 1 && fitting[0] ? { unit: fitting[0], how: `the values are those of ${range.how} in the preamble` } : null;
+}
+
+/** Frequencies within prose, such as "3 point scan, 20kHz-200MHz": the unit in which first and last value are two of them. */
+function unitByProse(values: readonly number[], preamble: Preamble): Found<FrequencyUnit> | null {
+  const said = preamble.lines.flatMap(({ text }) => [...text.matchAll(/(\d+(?:\.\d+)?)\s*([kMGT]?Hz)\b/gi)]).map((match) => Number(match[1]) * hertzPerUnit[frequencyUnitOf(match[2] ?? '') ?? 'Hz']);
+  const isSaid = (hz: number): boolean => said.some((one) => Math.abs(one - hz) <= 0.01 * one);
+  const fitting = (['Hz', 'kHz', 'MHz', 'GHz'] as const).filter((unit) => isSaid((values[0] ?? NaN) * hertzPerUnit[unit]) && isSaid((values.at(-1) ?? NaN) * hertzPerUnit[unit]));
+  return fitting.length === 1 && fitting[0] ? { unit: fitting[0], how: 'the range that the comments state' } : null;
+}
+
+const surelyHertz = 1e8;
+
+/**
+ * The unit of the frequency column: glued to the cells or in the header, a line of the preamble, start and stop, prose; a column that
+ * reaches 10⁸ can only be hertz. Otherwise a question.
+ */
+export function decideFrequencyUnit(notebook: Notebook, { headerText, values, preamble, range, rows }: { headerText: string; values: readonly number[]; preamble: Preamble; range: StatedRange | null; rows: RowsShown & { count: number } }): FrequencyUnit {
+  const show = (unit: FrequencyUnit): string => rows.frequency.map((value) => formatFrequency(value * hertzPerUnit[unit])).join('\n');
+  const inHeader = frequencyUnitOf(headerText) ?? frequencyUnitIn(headerText);
+  const key = entryOf(preamble, 'frequencyUnit');
+  const byKey = key === null ? null : frequencyUnitIn(key.value);
+  const stated: Found<FrequencyUnit>[] = [...(inHeader === null ? [] : [{ unit: inHeader, how: 'the column\u2019s header' }]), ...(byKey === null ? [] : [{ unit: byKey, how: `line ${(key?.line ?? 0) + 1}` }])];
+  const byRange = unitByRange(values, range, rows.count - 1);
+  const found = stated.length > 0 ? askConflict(notebook, 'frequency-unit', [...stated, ...(byRange !== null && stated.every((one) => one.unit !== byRange.unit) ? [byRange] : [])], rows, show) : byRange ?? unitByProse(values, preamble);
+  const highest = Math.max(values[0] ?? NaN, values.at(-1) ?? NaN);
+  const sure = found ?? (highest >= surelyHertz ? { unit: 'Hz' as const, how: 'the values are so large that they can only be hertz' } : null);
+  const unit = sure?.unit ?? ask(notebook, {
+    id: 'frequency-unit', code: 'unit-missing', message: 'The file does not tell the unit of its frequencies.', lines: rows.lines,
+    choices: (['Hz', 'kHz', 'MHz', 'GHz'] as const).filter((one) => highest * hertzPerUnit[one] <= 1e12 && highest * hertzPerUnit[one] >= 1).map((id) => ({ id, label: id, sample: show(id) })),
+  });
+  notebook.transcription.frequencyUnit = unit;
+  decide(notebook, 'frequencyUnit', sure?.how ?? 'a person\u2019s answer');
+  return unit;
+}
+
+const titleLines = 6;
+
+function levelUnitBeside(preamble: Preamble): Found<DeclaredLevelUnit> | null {
+  for (const { text, line } of preamble.lines.slice(-titleLines).reverse()) {
+    if (/default unit/i.test(text) || /offset|ref(?:erence)?[ .]*(?:level|pegel)|marker|limit|dB\/div|scale/i.test(text)) continue;
+    const unit = levelUnitIn(text);
+    const isTitle = /unit|trace|data|spur|ampl|level|pegel|y[- ]?axis/i.test(text);
+    if (unit !== null && isTitle) return { unit, how: `line ${line + 1}: "${text.trim().slice(0, 60)}"` };
+  }
+  return null;
+}
+
+function levelUnitByPreamble(preamble: Preamble): Found<DeclaredLevelUnit> | null {
+  const key = entryOf(preamble, 'levelUnit');
+  const byKey = key === null ? null : levelUnitIn(key.value);
+  if (byKey !== null) return { unit: byKey, how: `line ${(key?.line ?? 0) + 1}` };
+  const beside = levelUnitBeside(preamble);
+  if (beside !== null) return beside;
+  if (preamble.lines.some(({ text }) => /\blog(?:arithmic)? ?mag(?:nitude)?\b/i.test(text))) return { unit: 'dB', how: 'the comments call the values log magnitude' };
+  const reference = entryOf(preamble, 'referenceLevel');
+  const byReference = reference === null ? null : levelValue(reference.value, reference.keyText)?.unit ?? null;
+  return byReference === null || byReference === 'dB' ? null : { unit: byReference, how: `the reference level of line ${(reference?.line ?? 0) + 1}` };
+}
+
+const choices = ['dBm', 'dB\u00b5V', 'dB', 'dB\u00b5V/m', 'dBmV', 'V', 'mW'] as const;
+const apartDb = 107;
+
+/** A marker of the preamble that reads 107 dB off the same frequency's value: one of both is in the other unit. */
+function markerContradicts(preamble: Preamble, unit: DeclaredLevelUnit, levelAt: (frequency: number) => number): boolean {
+  const [where, what] = [entryOf(preamble, 'markerFrequency'), entryOf(preamble, 'markerLevel')];
+  if (where === null || what === null || (unit !== 'dBm' && unit !== 'dB\u00b5V')) return false;
+  const [frequency, level] = [where, what].map((entry) => Number.parseFloat(entry.value.split('|')[0] ?? ''));
+  const offset = levelAt(frequency ?? NaN) - (level ?? NaN);
+  return unit === 'dBm' && Math.abs(offset - apartDb) < 1;
+}
+
+/** The unit of a trace: glued or in its header, a line of the preamble, the trace's title, the reference level. Otherwise a question. */
+export function decideLevelUnit(notebook: Notebook, { unitText, name, preamble, rows, levelAt, middle }: { unitText: string; name: string; preamble: Preamble; rows: RowsShown; levelAt: (frequency: number) => number; middle: number }): DeclaredLevelUnit {
+  const show = (unit: DeclaredLevelUnit): string => rows.level.map((value) => `${value} ${unit}`).join('\n');
+  const own = levelUnitIn(unitText);
+  const stated = levelUnitByPreamble(preamble);
+  const found = own !== null ? { unit: own, how: 'the column\u2019s header or cells' } : stated;
+  if (own !== null && stated !== null && stated.unit !== own && entryOf(preamble, 'levelUnit') !== null) {
+    return settle(notebook, askConflict(notebook, 'level-unit', [{ unit: own, how: 'the column\u2019s header or cells' }, stated], rows, show));
+  }
+  if (found === null) {
+    const unit = ask(notebook, { id: 'level-unit', code: 'unit-missing', message: `The file does not tell the unit of "${name}".`, lines: rows.lines, choices: choices.map((id) => ({ id, label: id, sample: show(id) })) });
+    return settle(notebook, { unit, how: 'a person\u2019s answer' });
+  }
+  if (markerContradicts(preamble, found.unit, levelAt)) {
+    doubt(notebook, 'unit-contradicted', 'doubt', `The declared unit ${found.unit} and the marker of the preamble are 107 dB apart.`);
+    return settle(notebook, askConflict(notebook, 'level-unit', [found, { unit: 'dB\u00b5V', how: 'the marker, 107 dB away' }], rows, show));
+  }
+  if (found.unit === 'dBm' && middle > 60) {
+    const unit = ask(notebook, { id: 'level-unit', code: 'implausible-level', message: `"${name}" is declared in dBm, and its values lie around ${middle.toFixed(0)}: that is more power than any analyzer bears.`, lines: rows.lines, choices: [found.unit, 'dB\u00b5V' as const].map((id) => ({ id, label: id, sample: show(id) })) });
+    return settle(notebook, { unit, how: 'a person\u2019s answer' });
+  }
+  return settle(notebook, found);
+}
+
+function settle(notebook: Notebook, { unit, how }: Found<DeclaredLevelUnit>): DeclaredLevelUnit {
+  notebook.transcription.levelUnit ??= unit;
+  decide(notebook, 'levelUnit', how);
+  return unit;
+}

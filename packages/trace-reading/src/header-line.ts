@@ -1,0 +1,74 @@
+import type { DataBlock } from './data-blocks.js';
+import { readCell } from './cell-value.js';
+import { withoutCommentSign } from './preamble.js';
+import { plainWords, preambleKeyOf } from './setting-words.js';
+import { splitCells, type Separators } from './separators.js';
+import { lineAt, type TextLines } from './text-lines.js';
+import { frequencyUnitIn, frequencyUnitOf, levelUnitIn, levelUnitOf } from './unit-words.js';
+
+/** Names of columns as a file gives them, and a line of units beneath where there is one. */
+export interface Header {
+  readonly line: number;
+  readonly names: readonly string[];
+  readonly units: readonly string[];
+}
+
+const frequencyWord = /^(?:f|x|freq\w*|frequenz\w*|frequence\w*|frequency\w*|stimulus|fr)\b|\bfreq|\bfrequenz|\bfrequence/;
+const levelWord = /ampl|level|pegel|niveau|power|leistung|puissance|magnitude|^mag|trace|spur|betrag|spannung|tension|log mag|^s\d\d|^a$|^y$|signal|feld|field|champ|db|max|min|average|live|hold|messwert|valeur|wert|value|\bch\d|kanal|voie|^reading/;
+const indexWord = /^(?:no|nr|n|index|idx|point|points|punkt|row|zeile|ligne|i|num|lfd nr|pos)$/;
+const timeWord = /^(?:time|zeit|temps|t)\b/;
+const phaseWord = /phase|deg|winkel|angle|\bphi\b/;
+const limitWord = /limit|grenz|mask|limite|threshold/;
+
+/** What a column's name says of it. */
+export type NamedRole = 'frequency' | 'level' | 'index' | 'time' | 'phase' | 'limit' | null;
+
+/** What a name says a column is. */
+export function roleOfName(name: string): NamedRole {
+  const plain = plainWords(name);
+  if (name.trim() === '#' || indexWord.test(plain)) return 'index';
+  if (limitWord.test(plain)) return 'limit';
+  if (frequencyWord.test(plain) || (frequencyUnitIn(name) !== null && levelUnitIn(name) === null)) return 'frequency';
+  if (timeWord.test(plain)) return 'time';
+  if (phaseWord.test(plain) || name.includes('\u00b0')) return 'phase';
+  return levelWord.test(plain) || levelUnitIn(name) !== null || levelUnitOf(name) !== null ? 'level' : null;
+}
+
+function cellsOf(text: string, { delimiter }: Separators): string[] {
+  const bare = withoutCommentSign(text).replace(/^(?:DATA|FORMAT|COLUMNS?)\s+(?=\S)/i, '');
+  const cells = splitCells(bare, delimiter);
+  if (cells.length > 1 || delimiter === ' ') return cells.map((cell) => cell.trim().replace(/^"(.*)"$/, '$1'));
+  return (/\t/.test(bare) ? bare.split('\t') : bare.split(/\s*[,;]\s*|\s{2,}/)).map((cell) => cell.trim());
+}
+
+const isUnitCell = (cell: string): boolean => frequencyUnitOf(cell.replace(/^[[(](.*)[\])]$/, '$1')) !== null || levelUnitOf(cell.replace(/^[[(](.*)[\])]$/, '$1')) !== null;
+
+function isHeader(cells: readonly string[], width: number, { decimalMark }: Separators): boolean {
+  if (cells.length < Math.max(1, width - 1) || cells.length > width + 1) return false;
+  if (cells.some((cell) => readCell(cell, decimalMark).kind === 'number')) return false;
+  if (cells.some((cell) => /[:=]\s*\S/.test(cell))) return false;
+  const roles = cells.map(roleOfName);
+  const isKeyed = cells.length === 2 && preambleKeyOf(cells[0] ?? '') !== null && roles[0] !== 'frequency' && roles[0] !== 'index';
+  return !isKeyed && roles.some((role) => role !== null) && (width > 1 ? roles.includes('frequency') || roles.includes('index') || roles.includes('time') || roles.filter((role) => role === 'level').length >= width - 1 : roles[0] === 'level');
+}
+
+const linesAbove = 8;
+
+/** The line above a block that names its columns, with the line of units between them; null where there is none. */
+export function findHeader(lines: TextLines, block: DataBlock, separators: Separators): Header | null {
+  const width = block.columns.length;
+  let units: string[] = [];
+  let seen = 0;
+  for (let line = block.firstLine - 1; line >= 0 && seen < linesAbove; line -= 1) {
+    const text = lineAt(lines, line);
+    if (text.trim() === '') continue;
+    seen += 1;
+    const cells = cellsOf(text, separators);
+    if (units.length === 0 && cells.length >= Math.max(1, width - 1) && cells.length <= width && cells.some(isUnitCell) && cells.every((cell) => cell === '' || isUnitCell(cell) || /^(?:-|#|1|deg|\u00b0|rad|s)$/.test(cell))) {
+      units = cells.map((cell) => cell.replace(/^[[(](.*)[\])]$/, '$1'));
+      continue;
+    }
+    if (isHeader(cells, width, separators)) return { line, names: cells, units };
+  }
+  return units.length > 0 ? { line: block.firstLine - 1, names: units.map(() => ''), units } : null;
+}
