@@ -11,7 +11,8 @@ describe('from bytes to a curve, judged by what is true', () => {
     const curve = curveOfTruthFiles(files);
     expect(curve.style).toBe(variant.style);
     expect(curve.floorSource).toBe(variant.noiseSweep ? 'noise sweep' : variant.style === 'continuous' ? 'none' : 'beside the carriers');
-    expect(curve.driftDb).toBeCloseTo(0.6, 1);
+    // The references are 0.6 dB apart; each level is rounded to a step, and the drift is the largest over all carriers.
+    expect(Math.abs((curve.driftDb ?? 0) - 0.6)).toBeLessThanOrEqual(0.05 + variant.quantumDb);
     expect(failedGateLines(judgeCurve(curve.points, truth))).toEqual([]);
   });
 });

@@ -55,7 +55,7 @@ export function findCarriers(sweep: Sweep, floor: NoiseFloor, marginDb: number):
   const carriers: number[] = [];
   for (let bin = 0; bin < sweep.level.length; bin += 1) {
     const level = sweep.level[bin] ?? 0;
-    if ((sweep.level[bin - 1] ?? -Infinity) > level || (sweep.level[bin + 1] ?? -Infinity) >= level) continue;
+    if ((sweep.level[bin - 1] ?? -Infinity) >= level || (sweep.level[bin + 1] ?? -Infinity) > level) continue;
     const frequencyHz = sweep.frequencyHz[bin] ?? NaN;
     if (level < floorAt(floor, frequencyHz, marginDb, 1).thresholdLevel + carrierOverThresholdDb) continue;
     if (highestBin(sweep, frequencyHz, toleranceHz) !== bin) continue;

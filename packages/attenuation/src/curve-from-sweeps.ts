@@ -140,7 +140,7 @@ function floorSourceOf(readings: readonly PairReading[]): FloorSource {
 
 function styleOf(readings: readonly PairReading[], rowCount: number): SweepStyle['style'] {
   if (readings.some((reading) => reading.style === 'continuous')) return 'continuous';
-  return rowCount === 1 ? 'spot' : 'comb';
+  return rowCount === 1 || readings.every((reading) => reading.style === 'spot') ? 'spot' : 'comb';
 }
 
 function inputsOf(readings: readonly PairReading[]): string[] {
