@@ -26,7 +26,7 @@ const eventRedis = openFailFastRedis(configuration.redisUrl, onRedisError);
 const readers = openReaderPool();
 const tools = { db, store, readers, publish: makeEventPublisher(eventRedis), log, isStopping: () => isStopping, storeFolder: configuration.objectStoreFolder };
 
-const queue = openJobQueue({ redisUrl: configuration.redisUrl, onError: onRedisError });
+const queue = openJobQueue({ redisUrl: configuration.redisUrl, prefix: configuration.queuePrefix, onError: onRedisError });
 const relay = repeatUntilStopped(() => relayOnce(db, queue), { restMs: relayRestMs, onError: (fault) => log.warn({ reason: String(fault) }, 'relay') });
 const reconciler = repeatUntilStopped(async () => {
   const lost = await announceLostWork(db, configuration.lostAfterSeconds);
@@ -36,7 +36,7 @@ const reconciler = repeatUntilStopped(async () => {
   return 0;
 }, { restMs: configuration.reconcileEverySeconds * 1000, onError: (fault) => log.warn({ reason: String(fault) }, 'reconciler') });
 const worker = startJobWorker({
-  redisUrl: configuration.redisUrl, concurrency: configuration.concurrency, onError: onRedisError,
+  redisUrl: configuration.redisUrl, prefix: configuration.queuePrefix, concurrency: configuration.concurrency, onError: onRedisError,
   handlers: { 'read-files': (job) => readFiles(tools, job), 'compute-curves': (job) => computeCurves(tools, job) },
 });
 log.info('worker started');

@@ -27,11 +27,18 @@ const options = {
 };
 const payloadSchemas = { 'read-files': readFilesJobSchema, 'compute-curves': computeCurvesJobSchema };
 
+/** Where the queue is; copies that share a Redis keep apart by the prefix of their keys. */
+export interface QueuePlace {
+  readonly redisUrl: string;
+  readonly prefix: string;
+  readonly onError: (fault: Error) => void;
+}
+
 /** Opens the queue for adding. */
-export function openJobQueue({ redisUrl, onError }: { redisUrl: string; onError: (fault: Error) => void }): JobQueue {
+export function openJobQueue({ redisUrl, prefix, onError }: QueuePlace): JobQueue {
   const connection = openFailFastRedis(redisUrl, onError);
   const queues = new Map(jobKinds.map((kind) => {
-    const queue = new Queue(kind, { connection, skipWaitingForReady: true, skipVersionCheck: true, streams: { events: { maxLen: 1000 } } });
+    const queue = new Queue(kind, { connection, prefix, skipWaitingForReady: true, skipVersionCheck: true, streams: { events: { maxLen: 1000 } } });
     queue.on('error', onError);
     return [kind, queue];
   }));
@@ -56,12 +63,12 @@ export interface JobWorker {
 }
 
 /** Takes jobs of every kind. A lock lasts 10 s and a dead worker's job is taken up again within 15. */
-export function startJobWorker({ redisUrl, handlers, concurrency, onError }: { redisUrl: string; handlers: JobHandlers; concurrency: number; onError: (fault: Error) => void }): JobWorker {
+export function startJobWorker({ redisUrl, prefix, onError, handlers, concurrency }: QueuePlace & { handlers: JobHandlers; concurrency: number }): JobWorker {
   const connection = openPatientRedis(redisUrl, onError);
   const workers = jobKinds.map((kind) => {
     const handle = handlers[kind] as (payload: unknown) => Promise<void>;
     const worker = new Worker(kind, (job) => handle(payloadSchemas[kind].parse(job.data)), {
-      connection, concurrency, lockDuration: 10_000, stalledInterval: 5000, maxStalledCount: 2, drainDelay: 1,
+      connection, prefix, concurrency, lockDuration: 10_000, stalledInterval: 5000, maxStalledCount: 2, drainDelay: 1,
     });
     worker.on('error', onError);
     worker.on('failed', (_job, fault) => onError(fault));
