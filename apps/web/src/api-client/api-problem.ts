@@ -5,14 +5,17 @@ export interface FieldProblem { pointer: string; code: string; message: string }
 /** An answer that is no success, in words that can be shown. Status 0: nothing came back at all. */
 export class ApiProblem extends Error {
   override readonly name = 'ApiProblem';
+  readonly errors: readonly FieldProblem[];
+  readonly requestId: string | null;
   constructor(
     readonly status: number,
     readonly title: string,
     readonly detail: string,
-    readonly errors: readonly FieldProblem[] = [],
-    readonly requestId: string | null = null,
+    { errors = [], requestId = null }: { errors?: readonly FieldProblem[]; requestId?: string | null } = {},
   ) {
     super(detail || title);
+    this.errors = errors;
+    this.requestId = requestId;
   }
 }
 
@@ -28,7 +31,7 @@ const wordsForStatus: Readonly<Record<number, string>> = {
 };
 
 const fromBody = (body: ProblemBody): ApiProblem =>
-  new ApiProblem(body.status, body.title, body.detail, body.errors ?? [], body.requestId);
+  new ApiProblem(body.status, body.title, body.detail, { errors: body.errors ?? [], requestId: body.requestId });
 
 /** Turns any failed answer into a problem; a proxy's HTML page is told by its status alone. */
 export function problemFrom(status: number, text: string): ApiProblem {

@@ -1,10 +1,10 @@
 import { signOut } from '@leeside/contracts/authentication';
 import { useQueryClient } from '@tanstack/react-query';
-import { NavLink, useNavigate } from 'react-router-dom';
+import { Link, useLocation, useNavigate } from 'react-router-dom';
 import { callApi } from '../api-client/call-api';
 import { csrfToken } from '../api-client/csrf-token';
 import { Button } from '../components/Button';
-import { placesFor } from './places';
+import { isAt, placesFor } from './places';
 import { useSignedIn } from './session-context';
 import { Wordmark } from './Wordmark';
 
@@ -22,17 +22,18 @@ function useLeave(): () => Promise<void> {
 /** The narrow strip of places at the left of a wide page. */
 export function Spine() {
   const user = useSignedIn();
+  const { pathname } = useLocation();
   const leave = useLeave();
   return (
-    <div className="stitched not-printed sticky top-0 hidden h-dvh w-36 shrink-0 flex-col py-6 ps-5 desk:flex">
-      <NavLink to="/" className="no-underline"><Wordmark /></NavLink>
+    <header className="stitched not-printed sticky top-0 hidden h-dvh w-36 shrink-0 flex-col py-6 ps-5 desk:flex">
+      <Link to="/" className="no-underline"><Wordmark /></Link>
       <nav aria-label="Places" className="mt-9">
         <ul className="list-none">
           {placesFor(user).map((place) => (
             <li key={place.to}>
-              <NavLink to={place.to} end={place.to === '/'} className={({ isActive }) => `-ms-2.5 block py-1.5 ps-2.5 no-underline ${isActive ? 'ribbon font-semibold' : 'text-ink hover:underline'}`}>
+              <Link to={place.to} aria-current={isAt(place, pathname) ? 'page' : undefined} className={`-ms-2.5 block py-1.5 ps-2.5 no-underline ${isAt(place, pathname) ? 'ribbon font-semibold' : 'text-ink hover:underline'}`}>
                 {place.word}
-              </NavLink>
+              </Link>
             </li>
           ))}
         </ul>
@@ -43,21 +44,22 @@ export function Spine() {
         <p>{user.labName}</p>
         <Button kind="quiet" className="-ms-1.5 mt-1 text-xs" onClick={() => void leave()}>Sign out</Button>
       </div>
-    </div>
+    </header>
   );
 }
 
 /** The same places as a bar at the bottom of a narrow page. */
 export function BottomBar() {
   const user = useSignedIn();
+  const { pathname } = useLocation();
   return (
     <nav aria-label="Places" className="not-printed fixed inset-x-0 bottom-0 z-10 border-t border-edge bg-paper desk:hidden">
       <ul className="flex list-none justify-around overflow-x-auto">
         {placesFor(user).map((place) => (
           <li key={place.to} className="shrink-0">
-            <NavLink to={place.to} end={place.to === '/'} className={({ isActive }) => `flex min-h-12 items-center border-t-4 px-1.5 text-xs no-underline ${isActive ? 'border-copper font-semibold text-copper' : 'border-transparent text-ink'}`}>
+            <Link to={place.to} aria-current={isAt(place, pathname) ? 'page' : undefined} className={`flex min-h-12 items-center border-t-4 px-1.5 text-xs no-underline ${isAt(place, pathname) ? 'border-copper font-semibold text-copper' : 'border-transparent text-ink'}`}>
               {place.word}
-            </NavLink>
+            </Link>
           </li>
         ))}
       </ul>
@@ -69,9 +71,9 @@ export function TopLine() {
   const user = useSignedIn();
   const leave = useLeave();
   return (
-    <div className="not-printed flex items-center justify-between gap-3 border-b border-rule px-4 py-2 desk:hidden">
+    <header className="not-printed flex items-center justify-between gap-3 border-b border-rule px-4 py-2 desk:hidden">
       <Wordmark />
       <span className="flex items-center gap-2 text-xs text-faded">{user.name}<Button kind="quiet" className="text-xs" onClick={() => void leave()}>Sign out</Button></span>
-    </div>
+    </header>
   );
 }

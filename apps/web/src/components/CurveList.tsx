@@ -18,16 +18,20 @@ function Doubts({ curve }: { curve: CurveSummary }) {
   return <span className="text-xs"><span className={weightLooks[weight] ?? ''}>{weight}</span>: {first?.message}{more > 0 && ` (+ ${String(more)} more)`}</span>;
 }
 
+function Standing({ curve }: { curve: CurveSummary }) {
+  if (curve.state === 'ready') return <OutcomeMark outcome={curve.outcome} />;
+  return <StateMark state={curve.state === 'failed' ? 'no curve yet' : curve.state} />;
+}
+
 function CurveRow({ curve, named }: { curve: CurveSummary; named: 'sample' | 'session' }) {
-  const { lowest } = curve;
+  const lowest = curve.state === 'ready' ? curve.lowest : null;
   const name = named === 'sample' ? (curve.sampleCode ?? 'Without a sample') : curve.sessionTitle;
-  const isReady = curve.state === 'ready';
   return (
     <tr data-state={curve.state}>
       <Cell><Link to={`/curves/${curve.id}`} className="font-semibold">{name}</Link>{curve.condition && <span className="block text-xs text-faded">{curve.condition}</span>}</Cell>
-      <Cell>{isReady ? <OutcomeMark outcome={curve.outcome} /> : <StateMark state={curve.state === 'failed' ? 'no curve yet' : curve.state} />}</Cell>
-      <Cell figure>{lowest && isReady ? <Attenuation db={lowest.attenuationDb} atLeast={lowest.atLeast} /> : <NoFigure why="not computed" />}</Cell>
-      <Cell figure>{lowest && isReady ? <Frequency hz={lowest.frequencyHz} /> : <NoFigure why="not computed" />}</Cell>
+      <Cell><Standing curve={curve} /></Cell>
+      <Cell figure>{lowest ? <Attenuation db={lowest.attenuationDb} atLeast={lowest.atLeast} /> : <NoFigure why="not computed" />}</Cell>
+      <Cell figure>{lowest ? <Frequency hz={lowest.frequencyHz} /> : <NoFigure why="not computed" />}</Cell>
       <Cell>{curve.state === 'failed' ? <span className="text-xs">{curve.failure}</span> : <Doubts curve={curve} />}</Cell>
     </tr>
   );

@@ -22,8 +22,11 @@ export function Remark({ weight = 'did', children }: { weight?: Weight; children
   );
 }
 
+const weights: readonly DoubtBody['weight'][] = ['note', 'doubt', 'stops signing'];
+
+/** The gravest first. */
 export function DoubtRemarks({ doubts }: { doubts: readonly DoubtBody[] }) {
-  return doubts.map((doubt) => (
+  return [...doubts].sort((a, b) => weights.indexOf(b.weight) - weights.indexOf(a.weight)).map((doubt) => (
     <Remark key={`${doubt.code} ${String(doubt.line ?? '')} ${doubt.message}`} weight={doubt.weight}>
       {doubt.message}{doubt.line === undefined ? '' : ` (line ${String(doubt.line)})`}
     </Remark>

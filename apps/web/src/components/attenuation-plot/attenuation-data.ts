@@ -26,18 +26,23 @@ function pushBreak(columns: AttenuationColumns, hz: number): void {
   for (const column of [columns.exactDb, columns.boundDb, columns.ceilingDb, columns.lowerDb, columns.upperDb, columns.ownBoundDb]) column.push(null);
 }
 
+/** The uncertainty lies around an exact value and only below a bound. */
+function bandOf(db: number, uncertaintyDb: number | null | undefined, isBound: boolean): [number | null, number | null] {
+  if (uncertaintyDb === null || uncertaintyDb === undefined) return [null, null];
+  return [db - uncertaintyDb, isBound ? db : db + uncertaintyDb];
+}
+
 function pushPoint(columns: AttenuationColumns, points: CurvePointsBody, at: number): void {
-  const db = points.attenuationDb[at] ?? null;
+  const db = points.attenuationDb[at] ?? NaN;
   const isBound = points.atLeast[at] === true;
-  const uncertaintyDb = points.expandedUncertaintyDb[at] ?? null;
-  const hasBand = db !== null && uncertaintyDb !== null;
+  const [lowerDb, upperDb] = bandOf(db, points.expandedUncertaintyDb[at], isBound);
   columns.frequencyHz.push(points.frequencyHz[at] ?? NaN);
   columns.exactDb.push(isBound ? null : db);
   columns.ownBoundDb.push(isBound ? db : null);
   columns.boundDb.push(isBound ? db : null);
   columns.ceilingDb.push(points.ceilingDb[at] ?? null);
-  columns.lowerDb.push(hasBand ? db - uncertaintyDb : null);
-  columns.upperDb.push(hasBand ? (isBound ? db : db + uncertaintyDb) : null);
+  columns.lowerDb.push(lowerDb);
+  columns.upperDb.push(upperDb);
 }
 
 /** A dashed bound starts at the exact neighbour that it leaves. */

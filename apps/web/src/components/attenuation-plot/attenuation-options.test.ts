@@ -35,6 +35,9 @@ describe('the options of the attenuation plot', () => {
     expect(attenuationOptions(settings()).scales?.x?.distr).toBe(3);
     expect(attenuationOptions(settings({ axisKind: 'linear' })).scales?.x?.distr).toBe(1);
   });
+  test('a requirement that ends inside the window is named there and not at the right edge', () => {
+    expect(attenuationLabels(settings({ window: { fromHz: 1e8, toHz: 2e9 } })).map(({ text }) => text)).toEqual(['attenuation', 'ceiling']);
+  });
   test('each thing is named at its end; no requirement, no such name', () => {
     expect(attenuationLabels(settings()).map(({ text, value }) => [text, value])).toEqual([['attenuation', 60], ['ceiling', 71], ['required', 50]]);
     expect(attenuationLabels(settings({ segments: [] })).map(({ text }) => text)).toEqual(['attenuation', 'ceiling']);

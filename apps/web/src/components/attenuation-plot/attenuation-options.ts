@@ -3,7 +3,8 @@ import { drawEndLabels, type ValueLabel } from '../plot/draw-end-labels';
 import { lastValue } from '../plot/end-labels';
 import type { PlotColumns, PlotInstance, PlotOptions, PlotSeries } from '../plot/plot-instance';
 import type { AttenuationColumns } from './attenuation-data';
-import { drawChevrons, drawUncertainty, drawWash } from './draw-bounds';
+import { drawChevrons, drawWash } from './draw-bounds';
+import { drawUncertainty } from './draw-uncertainty';
 import { drawWall } from './draw-wall';
 import { requiredAt, type Segment } from './requirement-wall';
 
@@ -38,8 +39,7 @@ function attenuationSeries({ colours, joined }: AttenuationSettings): PlotSeries
 export function attenuationLabels({ columns, segments, window, colours }: AttenuationSettings): ValueLabel[] {
   const { frequencyHz, exactDb, ownBoundDb, ceilingDb } = columns;
   const shown = ownBoundDb.map((bound, at) => bound ?? exactDb[at] ?? null);
-  const lastHz = segments.reduce((hz, segment) => Math.max(hz, segment.toHz), 0);
-  const required = segments.map((segment) => requiredAt(segment, Math.min(window.toHz, lastHz))).findLast((db) => db !== null) ?? null;
+  const required = segments.map((segment) => requiredAt(segment, window.toHz)).findLast((db) => db !== null) ?? null;
   const labels: [string, string, number | null][] = [
     ['attenuation', colours.ink, lastValue(frequencyHz, shown, window.toHz)],
     ['ceiling', colours.faded, lastValue(frequencyHz, ceilingDb, window.toHz)],

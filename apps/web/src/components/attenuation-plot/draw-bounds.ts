@@ -5,7 +5,8 @@ import type { AttenuationColumns } from './attenuation-data';
 
 const chevronEveryPx = 20;
 const chevronHalfPx = 4.5;
-const shortestWashPx = 26;
+const shortestWashPx = 18;
+const aloneHalfPx = 4;
 
 interface Spot { x: number; y: number; ceilingY: number | null }
 
@@ -20,24 +21,31 @@ function boundSpots(plot: PlotInstance, { frequencyHz, ownBoundDb, ceilingDb }: 
   });
 }
 
+/** One slanting piece of the wash, between two bounds or around one that stands alone. */
+function washPiece(ctx: CanvasRenderingContext2D, from: Spot, to: Spot, leastPx: number): void {
+  const rise = ({ y, ceilingY }: Spot): number => Math.max(ceilingY === null ? 0 : y - ceilingY, leastPx);
+  ctx.beginPath();
+  ctx.moveTo(from.x, from.y);
+  ctx.lineTo(to.x, to.y);
+  ctx.lineTo(to.x, to.y - rise(to));
+  ctx.lineTo(from.x, from.y - rise(from));
+  ctx.closePath();
+  ctx.fill();
+}
+
 /** A light wash from each bound up to the ceiling, or a little way up where the bound is the ceiling: the truth is up there. */
 export function drawWash(plot: PlotInstance, columns: AttenuationColumns, colours: PlotColours): void {
   const spots = boundSpots(plot, columns);
   clipped(plot, (ctx, ratio) => {
-    const least = shortestWashPx * ratio;
-    for (let at = 0; at < spots.length; at += 1) {
-      const spot = spots[at];
-      if (!spot) continue;
+    ctx.fillStyle = colours.slate;
+    ctx.globalAlpha = 0.15;
+    const half = aloneHalfPx * ratio;
+    spots.forEach((spot, at) => {
+      if (!spot) return;
       const next = spots[at + 1];
-      const width = next ? Math.max(next.x - spot.x, ratio) : 5 * ratio;
-      const height = Math.max(spot.ceilingY === null ? 0 : spot.y - spot.ceilingY, least);
-      const fade = ctx.createLinearGradient(0, spot.y, 0, spot.y - height);
-      fade.addColorStop(0, colours.slate);
-      fade.addColorStop(1, 'transparent');
-      ctx.fillStyle = fade;
-      ctx.globalAlpha = 0.2;
-      ctx.fillRect(next ? spot.x : spot.x - width / 2, spot.y - height, width, height);
-    }
+      if (next) washPiece(ctx, spot, next, shortestWashPx * ratio);
+      else if (!spots[at - 1]) washPiece(ctx, { ...spot, x: spot.x - half }, { ...spot, x: spot.x + half }, shortestWashPx * ratio);
+    });
   });
 }
 
@@ -57,23 +65,5 @@ export function drawChevrons(plot: PlotInstance, columns: AttenuationColumns, co
       ctx.lineTo(spot.x + half, spot.y - 2 * ratio);
     }
     ctx.stroke();
-  });
-}
-
-/** The expanded uncertainty: a pale band around what was measured. */
-export function drawUncertainty(plot: PlotInstance, { frequencyHz, lowerDb, upperDb }: AttenuationColumns, colours: PlotColours): void {
-  clipped(plot, (ctx, ratio) => {
-    ctx.fillStyle = colours.copper;
-    ctx.globalAlpha = 0.16;
-    for (let at = 0; at < frequencyHz.length; at += 1) {
-      const lower = lowerDb[at] ?? null;
-      const upper = upperDb[at] ?? null;
-      if (lower === null || upper === null) continue;
-      const x = plot.valToPos(frequencyHz[at] ?? NaN, 'x', true);
-      const nextHz = (lowerDb[at + 1] ?? null) === null ? undefined : frequencyHz[at + 1];
-      const width = nextHz === undefined ? 3 * ratio : plot.valToPos(nextHz, 'x', true) - x;
-      const top = plot.valToPos(upper, 'y', true);
-      ctx.fillRect(x, top, Math.max(width, ratio), plot.valToPos(lower, 'y', true) - top);
-    }
   });
 }

@@ -1,4 +1,4 @@
-import { clipped } from '../plot/clipped';
+import { clipped, pixelRatio } from '../plot/clipped';
 import type { PlotColours } from '../plot/plot-colours';
 import type { PlotInstance } from '../plot/plot-instance';
 import { wallTop, type Segment, type WallPoint } from './requirement-wall';
@@ -30,6 +30,17 @@ function hatch(plot: PlotInstance, ctx: CanvasRenderingContext2D, stepPx: number
   ctx.stroke();
 }
 
+/** A wall that ends inside the plot is named at its own end. */
+function nameWall(plot: PlotInstance, ctx: CanvasRenderingContext2D, end: WallPoint, colours: PlotColours): void {
+  const ratio = pixelRatio(plot);
+  const x = plot.valToPos(end.hz, 'x', true);
+  if (x > plot.bbox.left + plot.bbox.width - 2 * ratio) return;
+  ctx.font = `600 ${String(12.5 * ratio)}px "Atkinson Hyperlegible Next", sans-serif`;
+  ctx.fillStyle = colours.faded;
+  ctx.textBaseline = 'middle';
+  ctx.fillText('required', x + 7 * ratio, plot.valToPos(end.db, 'y', true) + 9 * ratio);
+}
+
 /** The requirement: a hatched wall rising from below, over which the curve must stay. */
 export function drawWall(plot: PlotInstance, segments: readonly Segment[], colours: PlotColours): void {
   const { min, max } = plot.scales.x ?? {};
@@ -48,6 +59,8 @@ export function drawWall(plot: PlotInstance, segments: readonly Segment[], colou
       ctx.strokeStyle = colours.faded;
       ctx.lineWidth = 2 * ratio;
       ctx.stroke(wallPath(plot, top, false));
+      const end = top.at(-1);
+      if (end && segment === segments.at(-1)) nameWall(plot, ctx, end, colours);
     }
   });
 }

@@ -1,9 +1,9 @@
 import { getRequirement } from '@leeside/contracts/requirements';
 import type { Curve } from '@leeside/contracts/curves';
-import { useRef } from 'react';
+import { useMemo, useRef } from 'react';
 import { useApiQuery } from '../../api-client/use-api-query';
 import { useCurvePoints } from '../../components/attenuation-plot/use-curve-points';
-import { ErrorState } from '../../components/ErrorState';
+import { Answered } from '../../components/Answered';
 import { LoadingLines } from '../../components/LoadingLines';
 import { Passage } from '../../components/Passage';
 import { useWidth } from '../../components/plot/use-width';
@@ -32,23 +32,22 @@ export function CurveSheet({ curve }: { curve: Curve }) {
   const overview = useCurvePoints(curve.id, null, width, curve.revision);
   const zoomed = useCurvePoints(curve.id, view.zoom, width, curve.revision);
   const points = zoomed.data ?? overview.data ?? nothing;
-  const whole = wholeWindow(overview.data?.frequencyHz ?? []);
+  const whole = useMemo(() => wholeWindow(overview.data?.frequencyHz ?? []), [overview.data]);
   const cursor = usePlotCursor(points, curve.lowest?.frequencyHz ?? 0);
-  const ready = overview.data !== undefined && whole !== null && width > 0;
-  const thinned = points.frequencyHz.length < curve.pointCount;
+  const shown = points.frequencyHz.length;
   return (
     <>
       <Passage title="Attenuation" remarks={<CurveRemarks curve={curve} />}>
         <div className="border border-rule bg-sheet p-3 desk:p-5">
           <div ref={place}>
-            {ready && <CurvePlots curve={curve} points={points} segments={segments} whole={whole} view={view} cursor={cursor} width={width} />}
-            {overview.isError && <ErrorState error={overview.error} what="The points could not be loaded" onRetry={() => void overview.refetch()} />}
-            {!ready && !overview.isError && <LoadingLines what="the plot" lines={2} tall />}
+            <Answered query={overview} what="the points" loading={<LoadingLines what="the plot" lines={2} tall />}>
+              {() => whole && <CurvePlots curve={curve} points={points} segments={segments} whole={whole} view={view} cursor={cursor} width={width} />}
+            </Answered>
           </div>
         </div>
       </Passage>
-      <Passage title="In numbers" count={points.frequencyHz.length} remarks={thinned && <ThinnedRemark shown={points.frequencyHz.length} all={curve.pointCount} />}>
-        {ready && <CurveTable points={points} cursorAt={cursor.at} onCursor={cursor.moveTo} rows={view.rows} onRows={view.setRows} />}
+      <Passage title="In numbers" count={shown} remarks={shown < curve.pointCount && <ThinnedRemark shown={shown} all={curve.pointCount} />}>
+        {whole && <CurveTable points={points} cursorAt={cursor.at} onCursor={cursor.moveTo} rows={view.rows} onRows={view.setRows} />}
       </Passage>
     </>
   );

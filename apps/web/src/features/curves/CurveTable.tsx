@@ -1,7 +1,9 @@
 import type { CurvePointsBody } from '@leeside/contracts/curves';
 import { useState } from 'react';
 import { Button } from '../../components/Button';
-import { Attenuation, Frequency, Level, NoFigure } from '../../components/Figure';
+import { alignedFrequencies } from '../../components/aligned-frequencies';
+import { Attenuation, Level, NoFigure } from '../../components/Figure';
+import { readerLocale } from '../../components/reader-locale';
 import { Cell, HeadCell, Table } from '../../components/Table';
 import type { RowChoice } from './curve-view-in-address';
 import { chosenRows, readingAt } from './cursor-reading';
@@ -13,12 +15,14 @@ const words: Record<RowChoice, string> = { all: 'all points', bounds: 'bounds al
 
 const orDash = (db: number | null, why: string) => (db === null ? <NoFigure why={why} /> : <Level level={db} unit="dB" />);
 
-function PointRow({ points, at, marked, onCursor }: { points: CurvePointsBody; at: number; marked: boolean; onCursor: (hz: number) => void }) {
+interface PointRowProps { points: CurvePointsBody; at: number; frequency: string; marked: boolean; onCursor: (hz: number) => void }
+
+function PointRow({ points, at, frequency, marked, onCursor }: PointRowProps) {
   const reading = readingAt(points, at);
   if (!reading) return null;
   return (
     <tr aria-current={marked ? 'true' : undefined} data-bound={reading.atLeast} className={marked ? 'bg-paper outline-2 -outline-offset-2 outline-copper' : ''}>
-      <Cell figure className="ps-2!"><button type="button" className="text-copper underline underline-offset-4" onClick={() => onCursor(reading.hz)}><Frequency hz={reading.hz} /></button></Cell>
+      <Cell figure className="ps-2!"><button type="button" className="figure font-semibold text-copper hover:underline" title={`${String(reading.hz)} Hz`} onClick={() => onCursor(reading.hz)}>{frequency}</button></Cell>
       <Cell figure><Attenuation db={reading.attenuationDb} atLeast={reading.atLeast} decimals={2} /></Cell>
       <Cell figure>{orDash(reading.uncertaintyDb, 'not stated')}</Cell>
       <Cell figure>{orDash(reading.ceilingDb, 'not known')}</Cell>
@@ -42,6 +46,8 @@ function usePage(indices: readonly number[], cursorAt: number): [number, number,
 export function CurveTable({ points, cursorAt, onCursor, rows, onRows }: CurveTableProps) {
   const indices = chosenRows(points, rows);
   const [page, pages, turnTo] = usePage(indices, cursorAt);
+  const onPage = indices.slice(page * pageSize, (page + 1) * pageSize);
+  const frequencies = alignedFrequencies(onPage.map((at) => points.frequencyHz[at] ?? NaN), readerLocale());
   return (
     <>
       <div className="mb-3 flex flex-wrap items-center justify-between gap-3 text-sm">
@@ -60,7 +66,7 @@ export function CurveTable({ points, cursorAt, onCursor, rows, onRows }: CurveTa
         <Table caption="Points of the curve">
           <thead><tr>{['Frequency', 'Attenuation', 'Uncertainty ±', 'Ceiling', 'Required', 'Margin'].map((head) => <HeadCell key={head} figure>{head}</HeadCell>)}</tr></thead>
           <tbody>
-            {indices.slice(page * pageSize, (page + 1) * pageSize).map((at) => <PointRow key={at} points={points} at={at} marked={at === cursorAt} onCursor={onCursor} />)}
+            {onPage.map((at, row) => <PointRow key={at} points={points} at={at} frequency={frequencies[row] ?? ''} marked={at === cursorAt} onCursor={onCursor} />)}
           </tbody>
         </Table>
       )}

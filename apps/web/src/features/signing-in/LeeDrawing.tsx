@@ -1,6 +1,8 @@
 const rows = [0, 1, 2, 3, 4, 5, 6];
 
-const wave = (fromX: number, toX: number, y: number, height: number, step: number): string => {
+interface Wave { fromX: number; toX: number; y: number; height: number; step: number }
+
+const wave = ({ fromX, toX, y, height, step }: Wave): string => {
   const bends = Array.from({ length: Math.floor((toX - fromX) / step) }, () => `t${String(step)} 0`);
   return `M${String(fromX)} ${String(y)}q${String(step / 2)} ${String(-height)} ${String(step)} 0${bends.slice(1).join('')}`;
 };
@@ -14,9 +16,9 @@ export function LeeDrawing() {
           <path d="M0 0v7" stroke="var(--ink)" strokeWidth="2.400" />
         </pattern>
       </defs>
-      {rows.map((row) => <path key={row} d={wave(4, 268, 30 + row * 27, 26 - row, 33)} stroke="var(--copper)" strokeWidth="2" opacity={1 - row * 0.07} />)}
+      {rows.map((row) => <path key={row} d={wave({ fromX: 4, toX: 268, y: 30 + row * 27, height: 26 - row, step: 33 })} stroke="var(--copper)" strokeWidth="2" opacity={1 - row * 0.07} />)}
       <rect x="288" y="10" width="26" height="200" fill="url(#wall)" stroke="var(--ink)" strokeWidth="2" />
-      {rows.map((row) => <path key={row} d={wave(334, 474, 30 + row * 27, 5 - row * 0.6, 20)} stroke="var(--patina)" strokeWidth="1.800" />)}
+      {rows.map((row) => <path key={row} d={wave({ fromX: 334, toX: 474, y: 30 + row * 27, height: 5 - row * 0.6, step: 20 })} stroke="var(--patina)" strokeWidth="1.800" />)}
     </svg>
   );
 }

@@ -9,7 +9,6 @@ import { useMay } from '../../../app/session-context';
 import { Answered } from '../../../components/Answered';
 import { Button } from '../../../components/Button';
 import { Dialog } from '../../../components/Dialog';
-import { EmptyState } from '../../../components/EmptyState';
 import { Frequency, Level, NoFigure } from '../../../components/Figure';
 import { Passage } from '../../../components/Passage';
 import { Remark, Remarks } from '../../../components/Remarks';
@@ -58,7 +57,7 @@ export function Levels({ sessionId }: { sessionId: string }) {
   const [typing, setTyping] = useState(false);
   const remarks = (
     <Remarks about="typed levels">
-      <Remark>“2.4 GHz”, “2,4 GHz” and “433.92M” are all understood, and so is “−31 dBm”.</Remark>
+      <Remark>{'“2.4\u00a0GHz”, “2,4\u00a0GHz” and “433.92M” are all understood, and so is “−31\u00a0dBm”.'}</Remark>
       <Remark>An enclosed level marked “in the noise” gives a bound with the level typed <em>(common practice, no source)</em>.</Remark>
     </Remarks>
   );
@@ -66,7 +65,7 @@ export function Levels({ sessionId }: { sessionId: string }) {
     <Passage id="levels" title="Typed levels" count={query.data?.items.length} remarks={remarks} actions={mayType && <Button kind="quiet" aria-expanded={typing} onClick={() => setTyping(!typing)}>{typing ? 'Close the form' : 'Type a level'}</Button>}>
       {typing && <LevelForm sessionId={sessionId} />}
       <Answered query={query} what="the typed levels">
-        {({ items }) => items.length > 0 ? <LevelTable levels={items} mayType={mayType} /> : <EmptyState title="None typed">For a reading taken by eye, without a file.</EmptyState>}
+        {({ items }) => items.length > 0 ? <LevelTable levels={items} mayType={mayType} /> : <p className="text-sm text-faded">None typed. This is for a reading taken by eye, without a file.</p>}
       </Answered>
     </Passage>
   );

@@ -10,7 +10,7 @@ interface ChoiceProps { trace: Trace; disabled: boolean; onChange: (change: Trac
 function Guess({ what, disabled, onConfirm }: { what: string; disabled: boolean; onConfirm: () => void }) {
   return (
     <span className="flex items-center gap-1 text-xs text-ochre">
-      guessed from the name
+      a guess
       {!disabled && <Button kind="quiet" className="min-h-6! text-xs" onClick={onConfirm}>Right<span className="sr-only">, the {what} is right</span></Button>}
     </span>
   );

@@ -24,8 +24,7 @@ function SetUp({ trace, disabled, onChange }: PartProps) {
   );
 }
 
-function TraceFacts({ trace }: { trace: Trace }) {
-  const showsName = trace.name !== '' && trace.name !== trace.fileName;
+function TraceFacts({ trace, showsName }: { trace: Trace; showsName: boolean }) {
   return (
     <div className="min-w-0">
       <Link to={`/files/${trace.fileId}`} className={`font-semibold wrap-anywhere ${trace.setAside ? 'line-through' : ''}`}>{trace.fileName}</Link>
@@ -38,31 +37,45 @@ function TraceFacts({ trace }: { trace: Trace }) {
   );
 }
 
-/** One trace: what was measured, and what it is, edited where it stands. */
-export function TraceRow({ trace, mayEdit }: { trace: Trace; mayEdit: boolean }) {
-  const [open, setOpen] = useState(trace.polarisation !== '' || trace.position !== '' || trace.chainLossDb !== null || trace.transmitLevelDbm !== null);
+const hasSetUp = ({ polarisation, position, chainLossDb, transmitLevelDbm }: Trace): boolean =>
+  [polarisation, position].some((text) => text !== '') || [chainLossDb, transmitLevelDbm].some((level) => level !== null);
+
+function Acts({ trace, mayEdit, onChange }: { trace: Trace; mayEdit: boolean; onChange: (change: TraceChange) => void }) {
   const [asking, setAsking] = useState(false);
+  if (!mayEdit) return null;
+  const name = <span className="sr-only"> {trace.fileName}</span>;
+  if (trace.setAside !== undefined) return <Button kind="quiet" className="text-xs" onClick={() => onChange({ setAside: null })}>Bring back{name}</Button>;
+  return (
+    <>
+      <Button kind="quiet" className="text-xs" onClick={() => setAsking(true)}>Set aside{name}</Button>
+      {asking && <SetAsideDialog name={trace.fileName} onClose={() => setAsking(false)} onSetAside={(reason) => { setAsking(false); onChange({ setAside: reason }); }} />}
+    </>
+  );
+}
+
+/** One trace: what was measured, and what it is, edited where it stands. */
+export function TraceRow({ trace, mayEdit, showsName }: { trace: Trace; mayEdit: boolean; showsName: boolean }) {
+  const [open, setOpen] = useState(() => hasSetUp(trace));
   const change = useChangeTrace();
   const onChange = (body: TraceChange): void => change.mutate({ params: { id: trace.id }, body });
-  const disabled = !mayEdit || trace.setAside !== undefined;
+  const isEnclosed = trace.role === 'enclosed';
+  const part = { trace, disabled: !mayEdit || trace.setAside !== undefined, onChange };
   return (
     <li className="border-b border-rule py-3">
       <div className="grid gap-x-4 gap-y-2 desk:grid-cols-[minmax(0,1.3fr)_minmax(8.5rem,0.8fr)_minmax(9rem,1fr)_minmax(8rem,1fr)]">
-        <TraceFacts trace={trace} />
-        <TraceRole trace={trace} disabled={disabled} onChange={onChange} />
-        <div><TraceSample trace={trace} disabled={disabled} onChange={onChange} /></div>
-        <div>{trace.role === 'enclosed' && <InlineText label="Condition" value={trace.condition} disabled={disabled} onSave={(condition) => onChange({ condition })} />}</div>
+        <TraceFacts trace={trace} showsName={showsName} />
+        <TraceRole {...part} />
+        <TraceSample {...part} />
+        {isEnclosed && <InlineText label="Condition" value={trace.condition} disabled={part.disabled} onSave={(condition) => onChange({ condition })} />}
+        <div className={`flex flex-wrap items-center gap-x-3 ${isEnclosed ? 'desk:col-span-3 desk:col-start-2' : 'desk:col-span-2 desk:self-start desk:pt-5'}`}>
+          {trace.setAside !== undefined && <span className="flex items-center gap-2 text-sm text-faded"><StateMark state="set aside" />{trace.setAside}</span>}
+          <Button kind="quiet" className="-ms-1.5 text-xs" aria-expanded={open} onClick={() => setOpen(!open)}>{open ? 'Less of its set-up' : 'Its set-up'}</Button>
+          <Acts trace={trace} mayEdit={mayEdit} onChange={onChange} />
+          <span role="status" className="text-xs text-faded">{change.isPending ? 'saving …' : change.isSuccess && 'saved'}</span>
+        </div>
       </div>
-      {open && <SetUp trace={trace} disabled={disabled} onChange={onChange} />}
-      <div className="mt-1 flex flex-wrap items-center gap-x-4">
-        {trace.setAside !== undefined && <span className="flex items-center gap-2 text-sm text-faded"><StateMark state="set aside" />{trace.setAside}</span>}
-        <Button kind="quiet" className="text-xs" aria-expanded={open} onClick={() => setOpen(!open)}>{open ? 'Less' : 'Set-up: polarisation, position, chain, transmit level'}</Button>
-        {mayEdit && trace.setAside === undefined && <Button kind="quiet" className="text-xs" onClick={() => setAsking(true)}>Set aside<span className="sr-only"> {trace.fileName}</span></Button>}
-        {mayEdit && trace.setAside !== undefined && <Button kind="quiet" className="text-xs" onClick={() => onChange({ setAside: null })}>Bring back<span className="sr-only"> {trace.fileName}</span></Button>}
-        <span role="status" className="text-xs text-faded">{change.isPending ? 'saving …' : change.isSuccess ? 'saved' : ''}</span>
-      </div>
+      {open && <SetUp {...part} />}
       {change.isError && <ErrorState error={change.error} what="This was not saved" kept="The trace is as it was." />}
-      {asking && <SetAsideDialog name={trace.fileName} onClose={() => setAsking(false)} onSetAside={(reason) => { setAsking(false); onChange({ setAside: reason }); }} />}
     </li>
   );
 }

@@ -42,7 +42,7 @@ export function Traces({ sessionId }: { sessionId: string }) {
       <Answered query={query} what="the traces">
         {({ items }) => items.length === 0
           ? <EmptyState title="No trace yet">A trace stands here as soon as a file has been read.</EmptyState>
-          : <ul className="list-none">{items.map((trace) => <TraceRow key={trace.id} trace={trace} mayEdit={mayEdit} />)}</ul>}
+          : <ul className="list-none">{items.map((trace) => <TraceRow key={trace.id} trace={trace} mayEdit={mayEdit} showsName={items.filter(({ fileId }) => fileId === trace.fileId).length > 1} />)}</ul>}
       </Answered>
     </Passage>
   );

@@ -33,7 +33,10 @@ export function Tray({ session }: { session: Session }) {
   return (
     <Passage id="tray" title="Tray" count={session.files.length} remarks={remarks}>
       {mayUpload && <div className="mb-4 space-y-3"><BatchFields fields={fields} onFields={setFields} /><DropPlace onFiles={send} /></div>}
-      <p role="status" className="text-sm text-faded">{progressInWords(session.progress, uploads.filter(({ phase }) => phase === 'sending' || phase === 'queued').length)}</p>
+      <p className="flex gap-x-3 text-sm">
+        <span role="status" className="text-faded">{progressInWords(session.progress, uploads.filter(({ phase }) => phase === 'sending' || phase === 'queued').length)}</span>
+        {session.progress.curvesReady > 0 && <a href="#curves">To the curves</a>}
+      </p>
       {session.files.length + uploads.length === 0 && !mayUpload && <EmptyState title="No file yet">An engineer brings the sweeps of this session in here.</EmptyState>}
       <ul className="list-none">
         {uploads.map((upload) => <SendingRow key={upload.key} upload={upload} />)}
