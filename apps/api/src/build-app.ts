@@ -44,11 +44,12 @@ export function buildApp(tools: ApiTools): Express {
     response.set('X-Request-Id', String(request.id));
     next();
   });
-  app.use('/api/v1', headers.api, cookieParser(), express.json({ limit: '2mb' }), apiRouter(tools), answerUnknownRoute);
-  app.use('/api', headers.api, answerUnknownRoute);
-  app.use(operationsRouter(tools, version).use(headers.api));
+  app.use(headers.api);
+  app.use('/api/v1', cookieParser(), express.json({ limit: '2mb' }), apiRouter(tools), answerUnknownRoute);
+  app.use('/api', answerUnknownRoute);
+  app.use(operationsRouter(tools, version));
   if (tools.webFolder !== null) app.use(servePage(tools.webFolder, headers.page));
-  app.use(headers.api, answerUnknownRoute);
+  app.use(answerUnknownRoute);
   app.use(answerProblems(tools));
   return app;
 }

@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import { claimKey, keepAnswer, releaseKey, type KeyedRequest } from '@leeside/database/idempotency-store';
 import type { Database } from '@leeside/database/open-database';
 import type { Request } from 'express';
-import type { Answer } from './mount-endpoint.js';
+import type { Answer } from './answer.js';
 import { badRequest, conflict, HttpProblem } from './http-problem.js';
 import type { Principal } from './principal.js';
 
@@ -10,7 +10,7 @@ const longestKey = 200;
 
 /**
  * Answers a request that carries an `Idempotency-Key` once: sent again, it gets the first answer; with another payload 422, while the first
- * is under way 409.
+ * is under way 409. Given a transaction, key, work and answer are kept together or not at all: a crash leaves the key free.
  */
 export async function answerOnce(db: Database, { principal, request, payload }: { principal: Principal; request: Request; payload: unknown }, work: () => Promise<Answer | undefined>): Promise<Answer | undefined> {
   const key = request.get('Idempotency-Key');
@@ -27,7 +27,7 @@ export async function answerOnce(db: Database, { principal, request, payload }: 
     if (answer !== undefined) await keepAnswer(db, keyed, answer.status, answer.body ?? null);
     return answer;
   } catch (fault) {
-    await releaseKey(db, keyed);
+    await releaseKey(db, keyed).catch(() => undefined);
     throw fault;
   }
 }

@@ -7,6 +7,7 @@ import { authenticate } from '../authentication/authenticate.js';
 import { checkCsrf } from '../authentication/csrf-token.js';
 import { problemOfZod } from './answer-problems.js';
 import { badRequest, forbidden, HttpProblem, notFound, notSignedIn } from './http-problem.js';
+import type { Answer } from './answer.js';
 import { answerOnce } from './idempotency.js';
 import type { Principal } from './principal.js';
 
@@ -23,12 +24,6 @@ export interface Call<Definition extends Endpoint> {
   readonly response: Response;
 }
 
-/** What a handler gives back; a handler that wrote its answer itself gives undefined. */
-export interface Answer {
-  readonly status: number;
-  readonly body?: unknown;
-  readonly headers?: Readonly<Record<string, string>>;
-}
 export type Handler<Definition extends Endpoint> = (call: Call<Definition>) => Promise<Answer | undefined>;
 
 const isSafe = (method: string): boolean => method === 'GET' || method === 'HEAD';

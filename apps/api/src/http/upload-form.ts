@@ -78,13 +78,21 @@ function watchBytes(request: Request): Transform {
 interface Collected {
   readonly files: Promise<ArrivedFile>[];
   fieldAfterLastFile: boolean;
+  /** The first thing that was wrong. */
+  fault: Error | null;
 }
 
 /** Listens to the form's parts; a fault destroys the form with it. */
 function collectParts(form: Busboy, store: ObjectStore): Collected {
   const fields = makeFieldMemory();
-  const collected: Collected = { files: [], fieldAfterLastFile: false };
-  const fail = (fault: Error): void => void form.destroy(fault);
+  const collected: Collected = { files: [], fieldAfterLastFile: false, fault: null };
+  /** The form may not be destroyed from within its own events: it is still taking a chunk apart. */
+  const fail = (fault: Error): void => {
+    collected.fault ??= fault;
+    setImmediate(() => form.destroy(fault));
+  };
+  const open = new Set<Readable>();
+  form.once('close', () => open.forEach((stream) => stream.destroy()));
   form.on('field', (name, value, info) => {
     collected.fieldAfterLastFile = true;
     try {
@@ -95,9 +103,9 @@ function collectParts(form: Busboy, store: ObjectStore): Collected {
     }
   });
   form.on('file', (part, stream: Readable, info) => {
-    if (part !== 'file') {
-      stream.resume();
-      fail(badRequest('unknown-field', `Files are sent as "file", not "${part.slice(0, 100)}".`));
+    if (part !== 'file') fail(badRequest('unknown-field', `Files are sent as "file", not "${part.slice(0, 100)}".`));
+    if (collected.fault !== null) {
+      stream.on('error', () => undefined).resume();
       return;
     }
     collected.fieldAfterLastFile = false;
@@ -107,7 +115,8 @@ function collectParts(form: Busboy, store: ObjectStore): Collected {
     const arrived = store.putTemporary(stream).then((object) => ({ name, object, fields: inForce }));
     arrived.catch(fail);
     collected.files.push(arrived);
-    form.once('close', () => stream.destroy());
+    open.add(stream);
+    stream.once('close', () => open.delete(stream));
   });
   form.on('filesLimit', () => fail(badRequest('too-many-files', `A request takes ${uploadLimits.filesPerRequest} files. Nothing was kept.`)));
   form.on('fieldsLimit', () => fail(badRequest('too-many-fields', `A request takes ${uploadLimits.fieldsPerRequest} fields. Nothing was kept.`)));
@@ -130,7 +139,12 @@ export async function receiveFiles(request: Request, store: ObjectStore): Promis
   const form = openForm(request);
   const collected = collectParts(form, store);
   try {
-    await pipeline(request, watchBytes(request), form);
+    const watch = watchBytes(request);
+    watch.once('error', (fault) => {
+      collected.fault ??= fault;
+    });
+    await pipeline(request, watch, form);
+    if (collected.fault !== null) throw collected.fault;
     const files = await Promise.all(collected.files);
     if (files.length === 0) throw badRequest('no-file', 'The form holds no file.');
     if (collected.fieldAfterLastFile) throw badRequest('fields-after-last-file', 'A field describes the files after it; this form ends with a field.');
@@ -138,6 +152,6 @@ export async function receiveFiles(request: Request, store: ObjectStore): Promis
   } catch (fault) {
     const settled = await Promise.allSettled(collected.files);
     await Promise.all(settled.map((one) => (one.status === 'fulfilled' ? store.discard(one.value.object) : undefined)));
-    throw faultOfForm(fault);
+    throw faultOfForm(collected.fault ?? fault);
   }
 }

@@ -16,7 +16,8 @@ import { hashToken, randomToken } from '../../authentication/random-token.js';
 import { openSealedToken, sealToken } from '../../authentication/sealed-token.js';
 import { countFailedTry, forgiveTries, refuseTooManyTries } from '../../authentication/sign-in-limits.js';
 import { HttpProblem, notFound, notSignedIn } from '../../http/http-problem.js';
-import { mountEndpoint, type Answer } from '../../http/mount-endpoint.js';
+import type { Answer } from '../../http/answer.js';
+import { mountEndpoint } from '../../http/mount-endpoint.js';
 
 type Identity = Pick<Person, 'id' | 'name' | 'email' | 'roles' | 'clientId' | 'labName'>;
 

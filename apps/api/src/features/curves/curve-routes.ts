@@ -9,7 +9,8 @@ import { packPoints, wantsBinary } from '../../http/binary-points.js';
 import { attachment } from '../../http/content-disposition.js';
 import { cleanFileName } from '../../http/clean-file-name.js';
 import { notFound } from '../../http/http-problem.js';
-import { mountEndpoint, type Answer } from '../../http/mount-endpoint.js';
+import type { Answer } from '../../http/answer.js';
+import { mountEndpoint } from '../../http/mount-endpoint.js';
 import { curveCsv } from './curve-csv.js';
 
 const orNull = (values: Float32Array): (number | null)[] => Array.from(values, (value) => (Number.isNaN(value) ? null : value));

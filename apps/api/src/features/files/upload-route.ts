@@ -1,7 +1,7 @@
 import { uploadFiles } from '@leeside/contracts/files';
 import { recordAudit } from '@leeside/database/audit-store';
 import { insertFiles, type KeptFile } from '@leeside/database/file-store';
-import { inTransaction } from '@leeside/database/open-database';
+import { inTransaction, type Database } from '@leeside/database/open-database';
 import { belongsToLab } from '@leeside/database/sample-store';
 import { sessionExists } from '@leeside/database/session-store';
 import { rawFileKey } from '@leeside/object-store/object-store';
@@ -19,14 +19,11 @@ async function checkSamples({ db }: ApiTools, labId: string, files: readonly Arr
   }
 }
 
-/** Keeps bytes first, then all rows in one transaction: a row without bytes cannot be, bytes without a row are swept. */
-async function keepAll({ db, store }: ApiTools, { labId, personId }: Principal, sessionId: string, files: readonly ArrivedFile[]): Promise<KeptFile[]> {
-  for (const { object } of files) await store.keep(object, rawFileKey(labId, object.sha256));
-  return inTransaction(db, async (trx) => {
-    const kept = await insertFiles(trx, { labId, sessionId }, personId, files.map(({ name, object, fields }) => ({ name, sha256: object.sha256, byteCount: object.byteCount, fields })));
-    await recordAudit(trx, { labId, personId, action: 'files-uploaded', subjectKind: 'session', subjectId: sessionId, details: { files: kept.map(({ id, sha256 }) => ({ id, sha256 })) } });
-    return kept;
-  });
+/** All rows of a request in the caller's transaction; the bytes are kept before: a row without bytes cannot be, bytes without a row are swept. */
+async function keepRows(trx: Database, { labId, personId }: Principal, sessionId: string, files: readonly ArrivedFile[]): Promise<KeptFile[]> {
+  const kept = await insertFiles(trx, { labId, sessionId }, personId, files.map(({ name, object, fields }) => ({ name, sha256: object.sha256, byteCount: object.byteCount, fields })));
+  await recordAudit(trx, { labId, personId, action: 'files-uploaded', subjectKind: 'session', subjectId: sessionId, details: { files: kept.map(({ id, sha256 }) => ({ id, sha256 })) } });
+  return kept;
 }
 
 export function mountUpload(router: Router, tools: ApiTools): void {
@@ -36,10 +33,11 @@ export function mountUpload(router: Router, tools: ApiTools): void {
     try {
       await checkSamples(tools, principal.labId, files);
       const payload = files.map(({ name, object, fields }) => [name, object.sha256, fields]);
-      return await answerOnce(tools.db, { principal, request, payload }, async () => {
-        const items = await keepAll(tools, principal, params.id, files);
+      for (const { object } of files) await tools.store.keep(object, rawFileKey(principal.labId, object.sha256));
+      return await inTransaction(tools.db, (trx) => answerOnce(trx, { principal, request, payload }, async () => {
+        const items = await keepRows(trx, principal, params.id, files);
         return { status: 202, body: { items }, headers: { Location: `/api/v1/sessions/${params.id}` } };
-      });
+      }));
     } finally {
       await Promise.all(files.map(({ object }) => tools.store.discard(object)));
     }
