@@ -3,7 +3,7 @@ import { gateHolds, judgeCurve, pooledGates, type CurveToJudge } from './judge-c
 import { makeTruthSet } from './make-truth-set.js';
 
 const { truth } = makeTruthSet({
-  seed: 9, style: 'continuous', points: 1001, referencePoints: 1001, combSpacingBins: 20, quantumDb: 0.01, looks: { reference: 10, enclosed: 10, noise: 10 }, combined: 'held',
+  seed: 9, style: 'continuous', points: 1001, referencePoints: 1001, combSpacingBins: 20, spotSpanInRbw: 200, quantumDb: 0.01, looks: { reference: 10, enclosed: 10, noise: 10 }, combined: 'held',
   noiseSweep: true, rbwHz: 10_000, layout: 'plain', settingsWritten: true,
 });
 

@@ -9,8 +9,6 @@ import { truthSweepFile } from './truth-sweep-file.js';
 const driftDb = 0.6;
 const wholeBand: Band = { startHz: 3e7, stopHz: 6e9, label: '', order: 0 };
 const spotCarriers = 24;
-/** Width of a spot sweep in RBW. */
-const spotSpanInRbw = 200;
 
 /** What one group of sweeps covers. */
 interface Band {
@@ -101,7 +99,7 @@ const oneOf = (levels: TruthLevels, at: number): TruthLevels => ({
 function spotSet(options: TruthOptions): TruthSet {
   const carriersHz = Float64Array.from({ length: spotCarriers }, (_, carrier) => Math.round(4e7 * (5.5e9 / 4e7) ** (carrier / (spotCarriers - 1))));
   const levels = spreadLevels(carriersHz, options.rbwHz, randomSource(options.seed));
-  const spanHz = spotSpanInRbw * options.rbwHz;
+  const spanHz = options.spotSpanInRbw * options.rbwHz;
   const files = Array.from(carriersHz).flatMap((carrierHz, order) => {
     const band = { startHz: carrierHz - spanHz / 2, stopHz: carrierHz + spanHz / 2, label: `-${(carrierHz / 1e6).toFixed(3)}MHz`, order };
     return filesOf(options, band, carriersOn(options, oneOf(levels, order)));

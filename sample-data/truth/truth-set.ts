@@ -10,13 +10,15 @@ export interface TruthOptions {
   readonly referencePoints: number;
   /** Bins from one carrier of a comb to the next; nothing to other styles. */
   readonly combSpacingBins: number;
+  /** Width of a spot sweep in RBW; nothing to other styles. */
+  readonly spotSpanInRbw: number;
   /** Steps in which levels are written, dB. */
   readonly quantumDb: number;
   /** Sweeps held (or averaged) in each role. */
   readonly looks: { readonly reference: number; readonly enclosed: number; readonly noise: number };
   readonly combined: 'held' | 'averaged';
   readonly noiseSweep: boolean;
-  /** At most 100 kHz for spots, whose sweeps are 200 RBW wide. */
+  /** For spots so narrow that 40 MHz lies more than half a span above 0. */
   readonly rbwHz: number;
   readonly layout: FileLayout;
   /** False: no file tells its settings. */
