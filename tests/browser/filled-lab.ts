@@ -23,13 +23,20 @@ const spotLevels = spotFrequenciesHz.flatMap((frequencyHz, at) => [
   { role: 'enclosed', frequencyHz, levelDbm: at === 0 ? -98 : -85 + 4 * at, inTheNoise: at === 0, condition: 'one roll' },
 ]);
 
+const idOf = ({ items }: Listed, which: (item: Listed['items'][number], at: number) => boolean): string => {
+  const found = items.find(which);
+  if (!found) throw new Error(`Not among ${items.map(({ name }) => name).join(', ')}.`);
+  return found.id;
+};
+const firstOf = (list: Listed): string => idOf(list, (_, at) => at === 0);
+
 /** A session with a curve, one with typed levels alone, and one whose files ask or are refused. */
 export async function fillLab(system: RunningSystem): Promise<FilledLab> {
   const api = apiClient(system.baseUrl, await system.tokenOf('engineer'));
   const requirements = await api.get<Listed>('/requirements');
   const samples = await api.get<Listed>('/samples?limit=200');
-  const sampleId = samples.items.find(({ code }) => code === 'MP24-011')?.id ?? '';
-  const requirementId = requirements.items.find(({ name }) => name.startsWith('Portable'))?.id ?? requirements.items[0]?.id ?? '';
+  const sampleId = idOf(samples, ({ code }) => code === 'MP24-011');
+  const requirementId = idOf(requirements, ({ name }) => name.startsWith('Portable'));
   const open = (title: string) => api.post<{ id: string }>('/sessions', { title, heldOn: '2026-11-30', requirementId });
 
   const session = await open('Pouches on the long bench');
@@ -47,7 +54,7 @@ export async function fillLab(system: RunningSystem): Promise<FilledLab> {
   const uploaded = await api.upload<Listed>(troubled.id, [text('readings.csv', `${rows}\n`), text('letter.csv', 'Dear lab,\nplease find the pouches in the parcel.\n')]);
   await api.settled(troubled.id);
   return {
-    sessionId: session.id, curveId: curves.items[0]?.id ?? '', fileId: settled.files[0]?.id ?? '', spotCurveId: spotCurves.items[0]?.id ?? '',
-    troubledSessionId: troubled.id, askingFileId: uploaded.items[0]?.id ?? '', refusedFileId: uploaded.items[1]?.id ?? '', sampleId, requirementId,
+    sessionId: session.id, curveId: firstOf(curves), fileId: firstOf({ items: [...settled.files] }), spotCurveId: firstOf(spotCurves),
+    troubledSessionId: troubled.id, askingFileId: firstOf(uploaded), refusedFileId: idOf(uploaded, (_, at) => at === 1), sampleId, requirementId,
   };
 }

@@ -64,7 +64,9 @@ describe.each(looks)('%s', (label, size) => {
     await close();
     expect([...faults, ...complaints]).toEqual([]);
   });
+});
 
+describe.each(looks.filter(([label]) => label === 'wide-light' || label === 'phone-dark'))('%s', (label, size) => {
   test('a client sees only the plain page of their own samples', async () => {
     const { page, complaints, close } = await openBrowser(size);
     await signIn(page, system.baseUrl, 'client-a@leeside.example', demoPassword);

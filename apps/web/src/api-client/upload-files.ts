@@ -3,7 +3,7 @@ import { nothingCameBack, problemFrom } from './api-problem';
 import { csrfToken } from './csrf-token';
 import type { EndpointAnswer } from './endpoint-input';
 import { endpointUrl } from './endpoint-url';
-import { renewSession } from './renew-session';
+import { renewSession, tokenWasRenewed } from './renew-session';
 
 export type UploadFieldTexts = Partial<Record<UploadFieldName, string>>;
 export type UploadedFiles = EndpointAnswer<typeof uploadEndpoint>;
@@ -35,7 +35,8 @@ const post = (request: UploadRequest): Promise<RawAnswer> =>
 /** Sends files in one request, with progress, which fetch cannot tell. */
 export async function uploadFiles(request: UploadRequest): Promise<UploadedFiles> {
   let answer = await post(request);
-  if (answer.status === 401 && (await renewSession())) answer = await post(request);
+  const mayGoNow = (answer.status === 401 && (await renewSession())) || (answer.status === 403 && (await tokenWasRenewed()));
+  if (mayGoNow) answer = await post(request);
   if (answer.status !== 202) throw problemFrom(answer.status, answer.text);
   return uploadEndpoint.answers[202].parse(JSON.parse(answer.text));
 }

@@ -32,7 +32,7 @@ function CurveRow({ curve, named }: { curve: CurveSummary; named: 'sample' | 'se
       <Cell><Standing curve={curve} /></Cell>
       <Cell figure>{lowest ? <Attenuation db={lowest.attenuationDb} atLeast={lowest.atLeast} /> : <NoFigure why="not computed" />}</Cell>
       <Cell figure>{lowest ? <Frequency hz={lowest.frequencyHz} /> : <NoFigure why="not computed" />}</Cell>
-      <Cell>{curve.state === 'failed' ? <span className="text-xs">{curve.failure}</span> : <Doubts curve={curve} />}</Cell>
+      <Cell className="min-w-52">{curve.state === 'failed' ? <span className="text-xs">{curve.failure}</span> : <Doubts curve={curve} />}</Cell>
     </tr>
   );
 }

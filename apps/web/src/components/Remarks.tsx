@@ -1,11 +1,12 @@
 import type { DoubtBody } from '@leeside/contracts/field-schemas';
 import type { ReactNode } from 'react';
 
-type Weight = 'did' | 'cite' | DoubtBody['weight'];
+type Weight = 'did' | 'cite' | 'caution' | DoubtBody['weight'];
 
 const looks: Record<Weight, { rule: string; word: string; name: string }> = {
   'did': { rule: 'border-edge', word: 'text-faded', name: '' },
   'cite': { rule: 'border-edge border-dotted', word: 'text-faded', name: 'Source' },
+  'caution': { rule: 'border-copper border-s-4', word: 'text-copper', name: 'Caution' },
   'note': { rule: 'border-slate', word: 'text-slate', name: 'Note' },
   'doubt': { rule: 'border-ochre', word: 'text-ochre', name: 'Doubt' },
   'stops signing': { rule: 'border-plum border-double border-s-[5px]', word: 'text-plum', name: 'Stops signing' },

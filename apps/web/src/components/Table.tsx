@@ -3,7 +3,7 @@ import type { ReactNode, TdHTMLAttributes, ThHTMLAttributes } from 'react';
 /** Hairlines between rows, a heavier rule under the head; wide tables scroll inside their own frame. */
 export function Table({ caption, children, className = '' }: { caption: string; children: ReactNode; className?: string }) {
   return (
-    <div className="overflow-x-auto" role="region" aria-label={caption} tabIndex={0}>
+    <div className="relative overflow-x-auto" role="region" aria-label={`${caption}, table`} tabIndex={0}>
       <table className={`w-full border-collapse text-sm ${className}`}>
         <caption className="sr-only">{caption}</caption>
         {children}

@@ -26,7 +26,10 @@ function attenuationSeries({ colours, joined }: AttenuationSettings): PlotSeries
   const unjoined = joined ? {} : { paths: noLine };
   return [
     {},
-    { label: 'ceiling', stroke: colours.edge, width: 1, points: { show: false } },
+    {
+      label: 'ceiling', stroke: colours.edge, width: 1, ...unjoined,
+      points: joined ? { show: false } : { show: true, size: 9, width: 1, fill: 'transparent', stroke: colours.edge },
+    },
     { label: 'at least', stroke: colours.ink, width: 1.4, dash: [5, 4], points: { show: false }, ...unjoined },
     {
       label: 'attenuation', stroke: colours.ink, width: 2, ...unjoined,

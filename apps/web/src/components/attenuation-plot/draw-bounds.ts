@@ -5,7 +5,8 @@ import type { AttenuationColumns } from './attenuation-data';
 
 const chevronEveryPx = 20;
 const chevronHalfPx = 4.5;
-const shortestWashPx = 18;
+/** Layers that thin out upwards. */
+const washHeightsPx = [7, 14, 21];
 const aloneHalfPx = 4;
 
 interface Spot { x: number; y: number; ceilingY: number | null }
@@ -38,14 +39,16 @@ export function drawWash(plot: PlotInstance, columns: AttenuationColumns, colour
   const spots = boundSpots(plot, columns);
   clipped(plot, (ctx, ratio) => {
     ctx.fillStyle = colours.slate;
-    ctx.globalAlpha = 0.15;
+    ctx.globalAlpha = 0.07;
     const half = aloneHalfPx * ratio;
-    spots.forEach((spot, at) => {
-      if (!spot) return;
-      const next = spots[at + 1];
-      if (next) washPiece(ctx, spot, next, shortestWashPx * ratio);
-      else if (!spots[at - 1]) washPiece(ctx, { ...spot, x: spot.x - half }, { ...spot, x: spot.x + half }, shortestWashPx * ratio);
-    });
+    for (const height of washHeightsPx) {
+      spots.forEach((spot, at) => {
+        if (!spot) return;
+        const next = spots[at + 1];
+        if (next) washPiece(ctx, spot, next, height * ratio);
+        else if (!spots[at - 1]) washPiece(ctx, { ...spot, x: spot.x - half }, { ...spot, x: spot.x + half }, height * ratio);
+      });
+    }
   });
 }
 

@@ -36,6 +36,7 @@ export function PlotCanvas({ options, columns, width, height, cursor, onCursor, 
   const place = useRef<HTMLDivElement>(null);
   const drawn = useRef<PlotInstance | null>(null);
   const moved = useEffectEvent((plot: PlotInstance) => {
+    if (!plot.cursor.event) return;
     const left = plot.cursor.left ?? -1;
     if (left < 0) showCursor(plot, cursor);
     else onCursor(plot.posToVal(left, 'x'));
@@ -56,7 +57,7 @@ export function PlotCanvas({ options, columns, width, height, cursor, onCursor, 
         ...options.hooks,
         setCursor: [(instance) => moved(instance)],
         setSelect: [(instance) => selected(instance)],
-        ready: [(instance) => again(instance)],
+        draw: [...(options.hooks?.draw ?? []), (instance) => again(instance)],
       },
     }, columns, place.current);
     drawn.current = plot;

@@ -2,7 +2,7 @@ import type { Curve } from '@leeside/contracts/curves';
 import { formatNumber } from '@leeside/units/format-quantity';
 import { Link } from 'react-router-dom';
 import { EmptyState } from '../../components/EmptyState';
-import { Attenuation, Frequency, FrequencyRange, NoFigure } from '../../components/Figure';
+import { Decibels, Frequency, FrequencyRange, NoFigure } from '../../components/Figure';
 import { Passage } from '../../components/Passage';
 import { readerLocale } from '../../components/reader-locale';
 import { Remark, Remarks } from '../../components/Remarks';
@@ -10,7 +10,7 @@ import { Cell, HeadCell, Table } from '../../components/Table';
 
 type Band = Curve['bands'][number];
 
-const orNone = (db: number | null, atLeast: boolean) => (db === null ? <NoFigure why="too few points" /> : <Attenuation db={db} atLeast={atLeast} />);
+const orNone = (db: number | null, atLeast: boolean) => (db === null ? <NoFigure why="too few points" /> : <Decibels db={db} atLeast={atLeast} />);
 
 function BandRow({ band }: { band: Band }) {
   const { lowest } = band;
@@ -18,7 +18,7 @@ function BandRow({ band }: { band: Band }) {
     <tr>
       <Cell><FrequencyRange {...band} /></Cell>
       <Cell>{band.kind}</Cell>
-      <Cell figure>{lowest ? <Attenuation db={lowest.attenuationDb} atLeast={lowest.atLeast} /> : <NoFigure why="nothing measured" />}</Cell>
+      <Cell figure>{lowest ? <Decibels db={lowest.attenuationDb} atLeast={lowest.atLeast} /> : <NoFigure why="nothing measured" />}</Cell>
       <Cell figure>{lowest ? <Frequency hz={lowest.frequencyHz} /> : <NoFigure />}</Cell>
       <Cell figure>{orNone(band.q10Db, band.q10AtLeast)}</Cell>
       <Cell figure>{orNone(band.medianDb, band.medianAtLeast)}</Cell>
@@ -40,8 +40,8 @@ export function Bands({ bands }: { bands: readonly Band[] }) {
         <Table caption="Bands of the curve">
           <thead>
             <tr>
-              <HeadCell>Band</HeadCell><HeadCell>Kind</HeadCell><HeadCell figure>Lowest</HeadCell><HeadCell figure>at</HeadCell>
-              <HeadCell figure>10 % quantile</HeadCell><HeadCell figure>Median</HeadCell><HeadCell figure>Bounds</HeadCell><HeadCell figure>dB per decade</HeadCell>
+              <HeadCell>Band</HeadCell><HeadCell>Kind</HeadCell><HeadCell figure>Lowest, dB</HeadCell><HeadCell figure>at</HeadCell>
+              <HeadCell figure>10 % quantile, dB</HeadCell><HeadCell figure>Median, dB</HeadCell><HeadCell figure>Bounds</HeadCell><HeadCell figure>Slope, dB per decade</HeadCell>
             </tr>
           </thead>
           <tbody>{bands.map((band) => <BandRow key={`${band.kind} ${String(band.fromHz)}`} band={band} />)}</tbody>

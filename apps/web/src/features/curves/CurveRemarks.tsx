@@ -17,10 +17,8 @@ export function CurveRemarks({ curve }: { curve: Curve }) {
       <DoubtRemarks doubts={curve.doubts} />
       {decidedAtHz !== null && <Remark>The outcome was decided at <Frequency hz={decidedAtHz} />.</Remark>}
       {floorSource && <Remark>{floorWords[floorSource] ?? `Floor: ${floorSource}.`}</Remark>}
-      {driftDb === null
-        ? <Remark>There is no closing reference: whether the set-up drifted is not known.</Remark>
-        : <Remark>Between the opening and the closing reference the set-up moved by <Level level={driftDb} unit="dB" />. Their mean was used.</Remark>}
-      {notMeasured.length > 0 && <Remark weight="note">Required and not measured: {notMeasured.map((stretch, at) => <span key={stretch.fromHz}>{at > 0 && ', '}<FrequencyRange {...stretch} /></span>)}.</Remark>}
+      {driftDb !== null && <Remark>Between the opening and the closing reference the set-up moved by <Level level={driftDb} unit="dB" />. Their mean was used.</Remark>}
+      {notMeasured.length > 0 && <Remark weight="note">Required and not measured: {notMeasured.map((stretch, at) => <span key={stretch.fromHz}>{at > 0 && ', '}<FrequencyRange {...stretch} significant={4} /></span>)}.</Remark>}
       <Remark>A dashed line with chevrons is a bound: the truth lies there or higher.</Remark>
       {driftDb !== null && <Remark weight="cite">IEEE Std 299-2006, 4.4: the reference is measured again at the end; a move of more than ±3 dB calls for a repeat.</Remark>}
     </Remarks>

@@ -2,7 +2,7 @@ import type { CurvePointsBody } from '@leeside/contracts/curves';
 import { useState } from 'react';
 import { Button } from '../../components/Button';
 import { alignedFrequencies } from '../../components/aligned-frequencies';
-import { Attenuation, Level, NoFigure } from '../../components/Figure';
+import { Decibels, NoFigure } from '../../components/Figure';
 import { readerLocale } from '../../components/reader-locale';
 import { Cell, HeadCell, Table } from '../../components/Table';
 import type { RowChoice } from './curve-view-in-address';
@@ -13,7 +13,7 @@ interface CurveTableProps { points: CurvePointsBody; cursorAt: number; onCursor:
 const pageSize = 20;
 const words: Record<RowChoice, string> = { all: 'all points', bounds: 'bounds alone (≥)', below: 'below the requirement' };
 
-const orDash = (db: number | null, why: string) => (db === null ? <NoFigure why={why} /> : <Level level={db} unit="dB" />);
+const orDash = (db: number | null, why: string) => (db === null ? <NoFigure why={why} /> : <Decibels db={db} />);
 
 interface PointRowProps { points: CurvePointsBody; at: number; frequency: string; marked: boolean; onCursor: (hz: number) => void }
 
@@ -23,11 +23,11 @@ function PointRow({ points, at, frequency, marked, onCursor }: PointRowProps) {
   return (
     <tr aria-current={marked ? 'true' : undefined} data-bound={reading.atLeast} className={marked ? 'bg-paper outline-2 -outline-offset-2 outline-copper' : ''}>
       <Cell figure className="ps-2!"><button type="button" className="figure font-semibold text-copper hover:underline" title={`${String(reading.hz)} Hz`} onClick={() => onCursor(reading.hz)}>{frequency}</button></Cell>
-      <Cell figure><Attenuation db={reading.attenuationDb} atLeast={reading.atLeast} decimals={2} /></Cell>
+      <Cell figure><Decibels db={reading.attenuationDb} atLeast={reading.atLeast} decimals={2} /></Cell>
       <Cell figure>{orDash(reading.uncertaintyDb, 'not stated')}</Cell>
       <Cell figure>{orDash(reading.ceilingDb, 'not known')}</Cell>
       <Cell figure>{orDash(reading.requiredDb, 'nothing required')}</Cell>
-      <Cell figure className="pe-2!">{reading.marginDb === null ? <NoFigure why="nothing required" /> : <Attenuation db={reading.marginDb} atLeast={reading.atLeast} />}</Cell>
+      <Cell figure className="pe-2!">{reading.marginDb === null ? <NoFigure why="nothing required" /> : <Decibels db={reading.marginDb} atLeast={reading.atLeast} />}</Cell>
     </tr>
   );
 }
@@ -64,7 +64,7 @@ export function CurveTable({ points, cursorAt, onCursor, rows, onRows }: CurveTa
       </div>
       {indices.length === 0 ? <p className="py-4 text-sm text-faded">{rows === 'bounds' ? 'No bound in this window: every number here is exact.' : 'Nothing in this window lies below the requirement.'}</p> : (
         <Table caption="Points of the curve">
-          <thead><tr>{['Frequency', 'Attenuation', 'Uncertainty ±', 'Ceiling', 'Required', 'Margin'].map((head) => <HeadCell key={head} figure>{head}</HeadCell>)}</tr></thead>
+          <thead><tr>{['Frequency', 'Attenuation, dB', 'Uncertainty, ± dB', 'Ceiling, dB', 'Required, dB', 'Margin, dB'].map((head) => <HeadCell key={head} figure>{head}</HeadCell>)}</tr></thead>
           <tbody>
             {onPage.map((at, row) => <PointRow key={at} points={points} at={at} frequency={frequencies[row] ?? ''} marked={at === cursorAt} onCursor={onCursor} />)}
           </tbody>

@@ -6,7 +6,7 @@ interface PlotToolsProps { axisKind: AxisKind; zoomed: boolean; onAxisKind: (kin
 /** Everything that a drag or a key does, for a click. */
 export function PlotTools({ axisKind, zoomed, onAxisKind, onZoom, onReset, onLowest }: PlotToolsProps) {
   return (
-    <div className="not-printed flex flex-wrap items-center gap-x-3 gap-y-1">
+    <div className="not-printed -ms-1.5 flex flex-wrap items-center gap-x-3 gap-y-1">
       <Button kind="quiet" onClick={onLowest}>Lowest</Button>
       <Button kind="quiet" onClick={() => onZoom(0.5)}>Closer</Button>
       <Button kind="quiet" onClick={() => onZoom(2)} disabled={!zoomed}>Farther</Button>

@@ -13,6 +13,13 @@ const settingWords: Record<string, string> = {
   correctionsApplied: 'corrections applied by the analyzer', instrument: 'instrument', serial: 'serial number',
 };
 
+const decisionWords: Record<string, string> = {
+  columnsPassedOver: 'columns passed over', frequencyAxis: 'frequency axis', frequencyColumn: 'column of frequencies', levelColumns: 'columns of levels',
+};
+
+/** `same-frequency` and `sameFrequency` are one thing: what a person answered is written the first way, what was found the second. */
+const asWords = (name: string): string => name.replaceAll('-', ' ').replaceAll(/([a-z])([A-Z])/g, '$1 $2').toLowerCase();
+
 function settingText(name: string, value: unknown, locale: string): string {
   if (typeof value === 'boolean') return value ? 'yes' : 'no';
   if (typeof value !== 'number') return String(value);
@@ -29,7 +36,7 @@ function settingText(name: string, value: unknown, locale: string): string {
 export function transcriptionRows(transcription: Transcription, locale: string): TranscriptionRow[] {
   const { decidedBy, settings } = transcription;
   const row = (key: string, what: string, found: string | null): TranscriptionRow[] =>
-    found === null ? [] : [{ what, found, decidedBy: decidedBy[key] ?? '' }];
+    found === null ? [] : [{ what, found, decidedBy: decidedBy[asWords(key).replaceAll(' ', '-')] ?? decidedBy[key] ?? '' }];
   const lineText = (line: number | null): string | null => (line === null ? null : `line ${String(line)}`);
   return [
     ...row('encoding', 'encoding', transcription.encoding),
@@ -47,6 +54,6 @@ export function transcriptionRows(transcription: Transcription, locale: string):
 
 /** What was decided about and has no row of its own: nothing decided stays unsaid. */
 export function otherDecisions(transcription: Transcription): [string, string][] {
-  const said = new Set(['encoding', 'delimiter', 'decimalMark', 'headerLine', 'firstDataLine', 'rows', 'rowsSkipped', 'frequencyUnit', 'levelUnit', ...Object.keys(transcription.settings)]);
-  return Object.entries(transcription.decidedBy).filter(([what]) => !said.has(what));
+  const said = new Set([...['encoding', 'delimiter', 'decimalMark', 'headerLine', 'firstDataLine', 'rows', 'rowsSkipped', 'frequencyUnit', 'levelUnit'], ...Object.keys(transcription.settings)].map(asWords));
+  return Object.entries(transcription.decidedBy).filter(([what]) => !said.has(asWords(what))).map(([what, how]) => [decisionWords[what] ?? asWords(what), how]);
 }

@@ -31,7 +31,7 @@ export function RequirementsPage() {
   const mayEdit = useMay('requirement.edit');
   return (
     <>
-      <PageHead title="Requirements" folio="What attenuation is asked for, and how it is decided" action={mayEdit && <LinkButton kind="main" to="/requirements/new">State a requirement</LinkButton>} />
+      <PageHead broad title="Requirements" folio="What attenuation is asked for, and how it is decided" action={mayEdit && <LinkButton kind="main" to="/requirements/new">State a requirement</LinkButton>} />
       <Answered query={requirements} what="the requirements">
         {({ items, next }) => items.length === 0
           ? <EmptyState title="No requirement yet" action={mayEdit && <LinkButton to="/requirements/new">State the first one</LinkButton>}>Without one a curve has no outcome, only numbers.</EmptyState>

@@ -16,7 +16,7 @@ const remarks = (
   <Remarks about="a new sample">
     <Remark>An enclosed sweep whose file name holds this code is taken to be of this sample.</Remark>
     <Remark>The inside size tells at which frequencies the enclosure itself resonates.</Remark>
-    <Remark weight="doubt">Metallised liners conduct: no bare contacts, antennas or charging ports against them. Cells sealed into a bag get hot; watch them.</Remark>
+    <Remark weight="caution">Metallised liners conduct: no bare contacts, antennas or charging ports against them. Cells sealed into a bag get hot; watch them.</Remark>
   </Remarks>
 );
 

@@ -14,8 +14,8 @@ import { Passage } from '../../components/Passage';
 import { readerLocale } from '../../components/reader-locale';
 import { StateMark } from '../../components/StateMark';
 
-function Fact({ name, children }: { name: string; children: ReactNode }) {
-  return <div><dt className="text-xs text-faded">{name}</dt><dd>{children}</dd></div>;
+function Fact({ name, across = false, children }: { name: string; across?: boolean; children: ReactNode }) {
+  return <div className={across ? 'col-span-full' : ''}><dt className="text-xs text-faded">{name}</dt><dd>{children}</dd></div>;
 }
 
 const sizeText = (sizeM: readonly number[]): string => `${sizeM.map((metres) => formatNumber(metres * 1000, 0, readerLocale())).join(' × ')}\u2009mm`;
@@ -29,7 +29,7 @@ function Facts({ sample, ofLab }: { sample: Sample; ofLab: boolean }) {
       {ofLab && sample.clientName && <Fact name="Client">{sample.clientName}</Fact>}
       {sample.insideSizeM && <Fact name="Inside"><span className="figure">{sizeText(sample.insideSizeM)}</span></Fact>}
       <Fact name="Taken in"><Moment at={sample.createdAt} /></Fact>
-      {ofLab && sample.notes && <div className="col-span-full"><Fact name="Notes"><span className="whitespace-pre-line">{sample.notes}</span></Fact></div>}
+      {ofLab && sample.notes && <Fact name="Notes" across><span className="whitespace-pre-line">{sample.notes}</span></Fact>}
     </dl>
   );
 }

@@ -50,7 +50,7 @@ export function SamplesPage() {
   const ofLab = useMay('lab.read');
   return (
     <>
-      <PageHead title={ofLab ? 'Samples' : 'Your samples'} folio="The newest first" action={mayTakeIn && <LinkButton kind="main" to="/samples/new">Take a sample in</LinkButton>} />
+      <PageHead broad title={ofLab ? 'Samples' : 'Your samples'} folio="The newest first" action={mayTakeIn && <LinkButton kind="main" to="/samples/new">Take a sample in</LinkButton>} />
       {ofLab && <FindByCode />}
       <Answered query={samples} what="the samples">
         {({ items, next }) => items.length === 0

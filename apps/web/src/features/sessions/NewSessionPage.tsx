@@ -20,7 +20,7 @@ const remarks = (
   <Remarks about="a new session">
     <Remark>The requirement is fixed before the session, and with it the decision rule.</Remark>
     <Remark>The floor margin says how far above the noise floor a level must stand to be told from it. 6 dB unless the lab has a reason.</Remark>
-    <Remark weight="doubt">Transmitting needs a licence, an exempt band or a screened room. The lab answers to its local regulator.</Remark>
+    <Remark weight="caution">Transmitting needs a licence, an exempt band or a screened room. The lab answers to its local regulator.</Remark>
   </Remarks>
 );
 

@@ -30,7 +30,7 @@ export function SessionsPage() {
   const open = mayHold && <LinkButton kind="main" to="/sessions/new">New session</LinkButton>;
   return (
     <>
-      <PageHead title="Sessions" folio="The latest bench day first" action={open} />
+      <PageHead broad title="Sessions" folio="The latest bench day first" action={open} />
       <Answered query={sessions} what="the sessions">
         {({ items, next }) => items.length === 0
           ? <EmptyState title="No session yet" action={mayHold && <LinkButton to="/sessions/new">Open the first session</LinkButton>}>A session holds one stretch at the bench: its reference, its enclosed sweeps, its noise. Open one, then drop the sweeps of the day into its tray.</EmptyState>

@@ -3,8 +3,9 @@ import { formatNumber } from '@leeside/units/format-quantity';
 import { readerLocale } from '../../../components/reader-locale';
 import type { LocalUpload } from './upload-store';
 
-type Standing = 'done' | 'now' | 'open' | 'stuck';
+type Standing = 'done' | 'now' | 'open' | 'asks' | 'stuck';
 const looks: Record<Standing, string> = {
+  asks: 'border-ochre text-ochre font-semibold',
   done: 'border-patina text-faded', now: 'border-copper text-ink font-semibold', open: 'border-rule text-faded', stuck: 'border-plum text-plum font-semibold',
 };
 
@@ -18,7 +19,7 @@ function Track({ steps }: { steps: readonly [string, Standing][] }) {
 
 const readStep: Record<FileState, [string, Standing]> = {
   'waiting': ['to be read', 'open'], 'reading': ['reading', 'now'], 'read': ['read', 'done'],
-  'needs answer': ['asks', 'stuck'], 'refused': ['refused', 'stuck'],
+  'needs answer': ['asks you', 'asks'], 'refused': ['refused', 'stuck'],
 };
 
 /** Sending, stored, read: where a file that the server has really is. */
