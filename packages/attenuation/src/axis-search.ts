@@ -1,3 +1,5 @@
+import { valueAt } from '@leeside/units/value-at';
+
 /**
  * Index of the first frequency that is not below the given one.
  * @param axisHz ascending frequencies, Hz.
@@ -10,7 +12,7 @@ export function firstNotBelow(axisHz: Float64Array, frequencyHz: number): number
   let high = axisHz.length;
   while (low < high) {
     const middle = (low + high) >> 1;
-    if ((axisHz[middle] ?? 0) < frequencyHz) low = middle + 1;
+    if (valueAt(axisHz, middle) < frequencyHz) low = middle + 1;
     else high = middle;
   }
   return low;
@@ -25,7 +27,7 @@ export function firstNotBelow(axisHz: Float64Array, frequencyHz: number): number
 export function nearestIndex(axisHz: Float64Array, frequencyHz: number): number {
   const after = Math.min(firstNotBelow(axisHz, frequencyHz), axisHz.length - 1);
   if (after === 0) return 0;
-  return frequencyHz - (axisHz[after - 1] ?? 0) < (axisHz[after] ?? 0) - frequencyHz ? after - 1 : after;
+  return frequencyHz - valueAt(axisHz, after - 1) < valueAt(axisHz, after) - frequencyHz ? after - 1 : after;
 }
 
 /**
@@ -38,7 +40,7 @@ export function medianStepHz(axisHz: Float64Array): number {
   if (count < 1) return 0;
   const stride = Math.max(1, Math.floor(count / 1001));
   const steps: number[] = [];
-  for (let at = 0; at < count; at += stride) steps.push((axisHz[at + 1] ?? 0) - (axisHz[at] ?? 0));
+  for (let at = 0; at < count; at += stride) steps.push(valueAt(axisHz, at + 1) - valueAt(axisHz, at));
   steps.sort((one, other) => one - other);
-  return steps[steps.length >> 1] ?? 0;
+  return valueAt(steps, steps.length >> 1);
 }

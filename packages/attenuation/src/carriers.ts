@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import type { Sweep } from '@leeside/trace-reading/sweep';
 import { firstNotBelow, medianStepHz } from './axis-search.js';
 import { floorAt, noiseFloorOf, type NoiseFloor } from './noise-floor.js';
@@ -25,16 +26,16 @@ export function binsAround(axisHz: Float64Array, frequencyHz: number, toleranceH
 export function highestBin(sweep: Sweep, frequencyHz: number, toleranceHz: number): number {
   const { from, to } = binsAround(sweep.frequencyHz, frequencyHz, toleranceHz);
   let highest = -1;
-  for (let bin = from; bin < to; bin += 1) if (highest < 0 || (sweep.level[bin] ?? 0) > (sweep.level[highest] ?? 0)) highest = bin;
+  for (let bin = from; bin < to; bin += 1) if (highest < 0 || valueAt(sweep.level, bin) > valueAt(sweep.level, highest)) highest = bin;
   return highest;
 }
 
 /** Depth of the saddle on one side: the lowest level until a higher peak or the end. */
 function saddleLevel(level: Float32Array, peak: number, step: 1 | -1): number {
-  const top = level[peak] ?? 0;
+  const top = valueAt(level, peak);
   let lowest = top;
   for (let bin = peak + step; bin >= 0 && bin < level.length; bin += step) {
-    const value = level[bin] ?? 0;
+    const value = valueAt(level, bin);
     if (value > top) return lowest;
     if (value < lowest) lowest = value;
     if (lowest <= top - carrierOverThresholdDb) return lowest;
@@ -54,9 +55,9 @@ export function findCarriers(sweep: Sweep, floor: NoiseFloor, marginDb: number):
   const toleranceHz = carrierToleranceHz(sweep);
   const carriers: number[] = [];
   for (let bin = 0; bin < sweep.level.length; bin += 1) {
-    const level = sweep.level[bin] ?? 0;
-    if ((sweep.level[bin - 1] ?? -Infinity) >= level || (sweep.level[bin + 1] ?? -Infinity) > level) continue;
-    const frequencyHz = sweep.frequencyHz[bin] ?? NaN;
+    const level = valueAt(sweep.level, bin);
+    if (valueAt(sweep.level, bin - 1) >= level || valueAt(sweep.level, bin + 1) > level) continue;
+    const frequencyHz = valueAt(sweep.frequencyHz, bin);
     if (level < floorAt(floor, frequencyHz, marginDb, 1).thresholdLevel + carrierOverThresholdDb) continue;
     if (highestBin(sweep, frequencyHz, toleranceHz) !== bin) continue;
     if (Math.max(saddleLevel(sweep.level, bin, 1), saddleLevel(sweep.level, bin, -1)) > level - carrierOverThresholdDb) continue;

@@ -16,21 +16,31 @@ export interface CensoredValue {
 export function censoredQuantile(values: readonly CensoredValue[], quantile: number): CensoredValue | null {
   const sorted = [...values].sort((one, other) => one.value - other.value || Number(one.atLeast) - Number(other.atLeast));
   const target = 1 - quantile;
-  const slack = 1e-9;
-  let survival = 1;
-  for (let at = 0; at < sorted.length;) {
-    const value = sorted[at]?.value ?? NaN;
-    const atRisk = sorted.length - at;
-    let exact = 0;
-    for (; at < sorted.length && sorted[at]?.value === value; at += 1) if (sorted[at]?.atLeast === false) exact += 1;
-    if (exact === 0) continue;
-    survival *= 1 - exact / atRisk;
+  for (const { value, survival, next } of survivalSteps(sorted)) {
     if (survival < target - slack) return { value, atLeast: false };
-    if (survival <= target + slack) {
-      const next = sorted.slice(at).find((one) => !one.atLeast);
-      return next === undefined ? { value, atLeast: false } : { value: (value + next.value) / 2, atLeast: false };
-    }
+    if (survival <= target + slack) return { value: next === null ? value : (value + next) / 2, atLeast: false };
   }
   const largest = sorted.at(-1);
   return largest === undefined ? null : { value: largest.value, atLeast: true };
+}
+
+const slack = 1e-9;
+
+/** The survival after each exact value, with the exact value that follows. */
+function* survivalSteps(sorted: readonly CensoredValue[]): Iterable<{ value: number; survival: number; next: number | null }> {
+  let survival = 1;
+  for (let at = 0; at < sorted.length;) {
+    const value = sorted[at]?.value ?? NaN;
+    let after = at;
+    let exact = 0;
+    for (; sorted[after]?.value === value; after += 1) exact += Number(sorted[after]?.atLeast === false);
+    survival *= 1 - exact / (sorted.length - at);
+    at = after;
+    if (exact > 0) yield { value, survival, next: nextExact(sorted, after) };
+  }
+}
+
+function nextExact(sorted: readonly CensoredValue[], from: number): number | null {
+  for (let at = from; at < sorted.length; at += 1) if (sorted[at]?.atLeast === false) return sorted[at]?.value ?? null;
+  return null;
 }

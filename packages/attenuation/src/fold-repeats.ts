@@ -69,15 +69,36 @@ const medianCeiling = (rows: readonly CurveRow[]): number => {
   return known[known.length >> 1] ?? -Infinity;
 };
 
-/** Joins two bands: where they overlap, the one with the higher ceiling wins. */
-function joinBands(one: readonly CurveRow[], other: readonly CurveRow[]): { rows: CurveRow[]; seamHz: number | null } {
-  const lowHz = Math.max(one[0]?.frequencyHz ?? Infinity, other[0]?.frequencyHz ?? Infinity);
-  const highHz = Math.min(one.at(-1)?.frequencyHz ?? -Infinity, other.at(-1)?.frequencyHz ?? -Infinity);
-  const inOverlap = (row: CurveRow): boolean => row.frequencyHz >= lowHz && row.frequencyHz <= highHz;
-  const oneWins = medianCeiling(one.filter(inOverlap)) >= medianCeiling(other.filter(inOverlap));
-  const [kept, cut] = oneWins ? [one, other] : [other, one];
-  const rows = [...kept, ...cut.filter((row) => !inOverlap(row))].sort((a, b) => a.frequencyHz - b.frequencyHz);
-  return { rows, seamHz: lowHz <= highHz ? (oneWins === (one[0] === rows[0]) ? highHz : lowHz) : null };
+/** One band, folded. */
+interface FoldedBand {
+  readonly rows: readonly CurveRow[];
+  readonly lowHz: number;
+  readonly highHz: number;
+}
+
+function foldedBand(rows: readonly CurveRow[]): FoldedBand {
+  const frequencies = rows.map((row) => row.frequencyHz);
+  return { rows, lowHz: frequencies[0] ?? Infinity, highHz: frequencies.at(-1) ?? -Infinity };
+}
+
+/** Whether another band has the higher ceiling over what both cover. */
+function hasHigherCeiling(other: FoldedBand, own: FoldedBand): boolean {
+  const [lowHz, highHz] = [Math.max(own.lowHz, other.lowHz), Math.min(own.highHz, other.highHz)];
+  const shared = (band: FoldedBand): CurveRow[] => band.rows.filter((one) => one.frequencyHz >= lowHz && one.frequencyHz <= highHz);
+  return medianCeiling(shared(other)) > medianCeiling(shared(own));
+}
+
+/** Joins bands: where two overlap, the one with the higher ceiling wins, the earlier one where they are equal. */
+function joinBands(bands: readonly FoldedBand[]): { rows: CurveRow[]; seamsHz: number[] } {
+  const rows: CurveRow[] = [];
+  const seamsHz: number[] = [];
+  bands.forEach((band, place) => {
+    const others = bands.filter((other) => other !== band && other.highHz >= band.lowHz && other.lowHz <= band.highHz);
+    const losesTo = others.filter((other) => hasHigherCeiling(other, band) || (bands.indexOf(other) < place && !hasHigherCeiling(band, other)));
+    rows.push(...band.rows.filter((row) => !losesTo.some((other) => row.frequencyHz >= other.lowHz && row.frequencyHz <= other.highHz)));
+    seamsHz.push(...losesTo.map((other) => (other.lowHz > band.lowHz ? other.lowHz : other.highHz)));
+  });
+  return { rows: rows.sort((one, other) => one.frequencyHz - other.frequencyHz), seamsHz };
 }
 
 /**
@@ -93,16 +114,7 @@ export function foldRepeats(readings: readonly PairReading[]): { rows: readonly 
     if (band) band.push({ reading, pairIndex });
     else bands.push([{ reading, pairIndex }]);
   });
-  const doubts: Doubt[] = [];
-  let rows: readonly CurveRow[] = [];
-  for (const band of bands) {
-    const folded = mergeBand(band).map(worstOf);
-    if (rows.length === 0) rows = folded;
-    else {
-      const joined = joinBands(rows, folded);
-      if (joined.seamHz !== null) doubts.push({ code: 'bands-joined', weight: 'note', message: `Two bands overlap and were joined at ${joined.seamHz} Hz; where both were read, the one with the higher ceiling counts.` });
-      rows = joined.rows;
-    }
-  }
+  const { rows, seamsHz } = joinBands(bands.map((band) => foldedBand(mergeBand(band).map(worstOf))));
+  const doubts = seamsHz.map((seamHz): Doubt => ({ code: 'bands-joined', weight: 'note', message: `Two bands overlap and were joined at ${seamHz} Hz; where both were read, the one with the higher ceiling counts.` }));
   return { rows, doubts };
 }

@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { log10Of } from '@leeside/units/logarithm';
 import { firstNotBelow } from './axis-search.js';
 
@@ -16,17 +17,17 @@ const roundingShare = 0.01;
 export function interpolateLevel(axisHz: Float64Array, level: Float32Array, frequencyHz: number, widestHz: number): number {
   const after = firstNotBelow(axisHz, frequencyHz);
   const last = axisHz.length - 1;
-  if (after <= last && axisHz[after] === frequencyHz) return level[after] ?? NaN;
+  if (after <= last && axisHz[after] === frequencyHz) return valueAt(level, after);
   const nearStart = after === 0;
   if (nearStart || after > last) {
     const end = nearStart ? 0 : last;
-    const neighbour = axisHz[nearStart ? Math.min(1, last) : Math.max(0, last - 1)] ?? 0;
-    const reach = roundingShare * Math.abs((axisHz[end] ?? 0) - neighbour);
-    return Math.abs(frequencyHz - (axisHz[end] ?? 0)) <= reach ? (level[end] ?? NaN) : NaN;
+    const neighbour = valueAt(axisHz, nearStart ? Math.min(1, last) : Math.max(0, last - 1));
+    const reach = roundingShare * Math.abs(valueAt(axisHz, end) - neighbour);
+    return Math.abs(frequencyHz - valueAt(axisHz, end)) <= reach ? valueAt(level, end) : NaN;
   }
-  const lowHz = axisHz[after - 1] ?? NaN;
-  const highHz = axisHz[after] ?? NaN;
+  const lowHz = valueAt(axisHz, after - 1);
+  const highHz = valueAt(axisHz, after);
   if (highHz - lowHz > widestHz) return NaN;
   const share = lowHz > 0 ? (log10Of(frequencyHz) - log10Of(lowHz)) / (log10Of(highHz) - log10Of(lowHz)) : (frequencyHz - lowHz) / (highHz - lowHz);
-  return (level[after - 1] ?? NaN) * (1 - share) + (level[after] ?? NaN) * share;
+  return valueAt(level, after - 1) * (1 - share) + valueAt(level, after) * share;
 }

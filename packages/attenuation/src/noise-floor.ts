@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { decibelsFromPowerRatio, powerRatioFromDecibels } from '@leeside/units/decibels';
 import { largestOfNoiseDb, looksFromSpread } from './noise-statistics.js';
 import { runningQuantile } from './running-rank.js';
@@ -23,11 +24,11 @@ const clipAtMads = 5;
 const leastScatterDb = 0.2;
 
 function quantileOf(sorted: Float32Array, quantile: number): number {
-  return sorted[Math.min(sorted.length - 1, Math.max(0, Math.ceil(quantile * sorted.length) - 1))] ?? NaN;
+  return valueAt(sorted, Math.min(sorted.length - 1, Math.max(0, Math.ceil(quantile * sorted.length) - 1)));
 }
 
 function residualsOf(level: Float32Array, median: Float32Array): Float32Array {
-  return level.map((value, bin) => value - (median[bin] ?? 0));
+  return level.map((value, bin) => value - valueAt(median, bin));
 }
 
 /** Replaces what stands far above the running median by the median itself, until nothing does. */
@@ -40,8 +41,8 @@ function withoutStraySignals(level: Float32Array): { clean: Float32Array; median
     const limit = clipAtMads * Math.max(mad, leastScatterDb);
     let clipped = 0;
     for (let bin = 0; bin < clean.length; bin += 1) {
-      if ((residuals[bin] ?? 0) <= limit) continue;
-      clean[bin] = median[bin] ?? 0;
+      if (valueAt(residuals, bin) <= limit) continue;
+      clean[bin] = valueAt(median, bin);
       clipped += 1;
     }
     if (clipped === 0) break;
@@ -88,11 +89,11 @@ function medianAt(floor: NoiseFloor, frequencyHz: number): number {
   let high = axis.length - 1;
   while (low < high) {
     const middle = (low + high) >> 1;
-    if ((axis[middle] ?? 0) < frequencyHz) low = middle + 1;
+    if (valueAt(axis, middle) < frequencyHz) low = middle + 1;
     else high = middle;
   }
-  const before = low > 0 && frequencyHz - (axis[low - 1] ?? 0) < (axis[low] ?? 0) - frequencyHz ? low - 1 : low;
-  return floor.medianLevel[before] ?? NaN;
+  const before = low > 0 && frequencyHz - valueAt(axis, low - 1) < valueAt(axis, low) - frequencyHz ? low - 1 : low;
+  return valueAt(floor.medianLevel, before);
 }
 
 /**

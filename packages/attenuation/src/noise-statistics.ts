@@ -1,4 +1,5 @@
 import { decibelsFromPowerRatio } from '@leeside/units/decibels';
+import { log10Of } from '@leeside/units/logarithm';
 
 /**
  * Quantile of the largest of n independent noise powers, relative to the mean noise power: −ln(1 − q^(1/n)), equation (1).
@@ -72,7 +73,7 @@ function alongSignal(row: readonly number[], snrDb: number): number {
  * @source median of the largest of n non-central χ² variables with two degrees of freedom (computed).
  */
 export function excessDb(readingOverNoiseDb: number, looks: number): number {
-  const decade = Math.min(Math.max(Math.log(looks) / Math.LN10, 0), 3);
+  const decade = Math.min(Math.max(log10Of(looks), 0), 3);
   const lower = Math.min(Math.floor(decade), 2);
   const share = decade - lower;
   const at = (snrDb: number): number =>

@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import type { Sweep } from '@leeside/trace-reading/sweep';
 
 /**
@@ -7,6 +8,6 @@ import type { Sweep } from '@leeside/trace-reading/sweep';
  */
 export function peakOf(sweep: Sweep): { frequencyHz: number; level: number } {
   let highest = 0;
-  for (let bin = 1; bin < sweep.level.length; bin += 1) if ((sweep.level[bin] ?? 0) > (sweep.level[highest] ?? 0)) highest = bin;
-  return { frequencyHz: sweep.frequencyHz[highest] ?? NaN, level: sweep.level[highest] ?? NaN };
+  for (let bin = 1; bin < sweep.level.length; bin += 1) if (valueAt(sweep.level, bin) > valueAt(sweep.level, highest)) highest = bin;
+  return { frequencyHz: valueAt(sweep.frequencyHz, highest), level: valueAt(sweep.level, highest) };
 }

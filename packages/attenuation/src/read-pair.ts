@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import type { Doubt } from '@leeside/trace-reading/transcription';
 import { medianStepHz, nearestIndex } from './axis-search.js';
 import { binsAround, carrierToleranceHz, highestBin, carrierOverThresholdDb } from './carriers.js';
@@ -6,7 +7,7 @@ import type { FloorSource, GapReason, Pair } from './curve-result.js';
 import type { FoundFloor } from './floor-source.js';
 import { interpolateLevel } from './interpolate-level.js';
 import { floorAt, type FloorLevel } from './noise-floor.js';
-import { attenuationOf } from './reading-points.js';
+import { attenuationOf, type Reading } from './reading-points.js';
 import { spanOf, type ReferencePair } from './pair-sweeps.js';
 import type { SweepStyle } from './sweep-style.js';
 
@@ -56,7 +57,7 @@ function levelReader(measured: MeasuredSweep, style: SweepStyle['style']): Level
   const toleranceHz = carrierToleranceHz(sweep);
   return (frequencyHz) => {
     const bin = highestBin(sweep, frequencyHz, toleranceHz);
-    return bin < 0 ? NaN : (sweep.level[bin] ?? NaN);
+    return bin < 0 ? NaN : valueAt(sweep.level, bin);
   };
 }
 
@@ -66,7 +67,7 @@ function floorReader(found: FoundFloor, marginDb: number, binsRead: number): (fr
   const axis = floor.frequencyHz;
   const reachHz = found.source === 'beside the carriers' ? Infinity : 2 * medianStepHz(axis);
   return (frequencyHz) => {
-    const distanceHz = Math.abs((axis[nearestIndex(axis, frequencyHz)] ?? Infinity) - frequencyHz);
+    const distanceHz = Math.abs(valueAt(axis, nearestIndex(axis, frequencyHz)) - frequencyHz);
     return distanceHz <= reachHz ? floorAt(floor, frequencyHz, marginDb, binsRead) : null;
   };
 }
@@ -81,7 +82,7 @@ function correctionDb(reference: MeasuredSweep, enclosed: MeasuredSweep): number
 function binsReadAround(enclosed: MeasuredSweep, style: SweepStyle['style']): number {
   if (style === 'continuous') return 1;
   const axis = enclosed.sweep.frequencyHz;
-  const middle = axis[axis.length >> 1] ?? NaN;
+  const middle = valueAt(axis, axis.length >> 1);
   const { from, to } = binsAround(axis, middle, carrierToleranceHz(enclosed.sweep));
   return Math.max(1, to - from);
 }
@@ -109,41 +110,49 @@ function frequenciesToRead({ enclosed, style }: PairToRead): readonly number[] {
   return style.carrierHz.filter((frequencyHz) => frequencyHz >= low - toleranceHz && frequencyHz <= high + toleranceHz);
 }
 
+/** Reads everything that is known at one frequency. */
+function frequencyReader(toRead: PairToRead): (frequencyHz: number) => { readonly reading: Reading; readonly movedDb: number; readonly gap: GapReason | null } {
+  const { enclosed, references: { opening, closing }, style: { style }, leakage, floorMarginDb } = toRead;
+  const nothing: LevelAt = () => NaN;
+  const read = {
+    opening: levelReader(opening, style), closing: closing === null ? nothing : levelReader(closing, style), enclosed: levelReader(enclosed, style), leakage: leakage === null ? nothing : levelReader(leakage, style),
+    floor: floorReader(toRead.enclosedFloor, floorMarginDb, binsReadAround(enclosed, style)), referenceFloor: floorReader(toRead.referenceFloor, floorMarginDb, 1),
+  };
+  const corrected = correctionDb(opening, enclosed);
+  return (frequencyHz) => {
+    const [openingLevel, closingLevel, leakageLevel] = [read.opening(frequencyHz), read.closing(frequencyHz), read.leakage(frequencyHz)];
+    const referenceLevel = Number.isFinite(closingLevel) ? (openingLevel + closingLevel) / 2 : openingLevel;
+    const enclosedLevel = read.enclosed(frequencyHz);
+    const reading = { referenceLevel, enclosedLevel, floor: read.floor(frequencyHz), leakageLevel: Number.isFinite(leakageLevel) ? leakageLevel : null, correctionDb: corrected, settings: enclosed.sweep.settings };
+    return { reading, movedDb: closingLevel - openingLevel, gap: gapReason(referenceLevel, enclosedLevel, read.referenceFloor(frequencyHz)) };
+  };
+}
+
 /**
  * Reads one enclosed sweep against its reference, frequency by frequency.
  * @param toRead the sweep with its pair, style and floors.
  */
 export function readPair(toRead: PairToRead): PairReading {
-  const { enclosed, references: { opening, closing }, style, enclosedFloor, referenceFloor, leakage, floorMarginDb } = toRead;
-  const read = { opening: levelReader(opening, style.style), closing: closing && levelReader(closing, style.style), enclosed: levelReader(enclosed, style.style), leakage: leakage && levelReader(leakage, style.style) };
-  const floorOfEnclosed = floorReader(enclosedFloor, floorMarginDb, binsReadAround(enclosed, style.style));
-  const floorOfReference = floorReader(referenceFloor, floorMarginDb, 1);
-  const corrected = correctionDb(opening, enclosed);
+  const { enclosed, references: { opening, closing }, style: { style }, enclosedFloor } = toRead;
+  const readAt = frequencyReader(toRead);
   const rows: PairRow[] = [];
   const gaps: { frequencyHz: number; reason: GapReason }[] = [];
-  const differences: number[] = [];
+  const movedDb: number[] = [];
   let noiseTakenOut = false;
   for (const frequencyHz of frequenciesToRead(toRead)) {
-    const openingLevel = read.opening(frequencyHz);
-    const closingLevel = read.closing === null ? NaN : read.closing(frequencyHz);
-    const enclosedLevel = read.enclosed(frequencyHz);
-    const referenceLevel = Number.isFinite(closingLevel) ? (openingLevel + closingLevel) / 2 : openingLevel;
-    const reason = gapReason(referenceLevel, enclosedLevel, floorOfReference(frequencyHz));
-    if (reason !== null) {
-      gaps.push({ frequencyHz, reason });
+    const { reading, movedDb: moved, gap } = readAt(frequencyHz);
+    if (gap !== null) {
+      gaps.push({ frequencyHz, reason: gap });
       continue;
     }
-    differences.push(closingLevel - openingLevel);
-    const floor = floorOfEnclosed(frequencyHz);
-    const leakageLevel = read.leakage === null ? NaN : read.leakage(frequencyHz);
-    const result = attenuationOf({ referenceLevel, enclosedLevel, floor, leakageLevel: Number.isFinite(leakageLevel) ? leakageLevel : null, correctionDb: corrected, settings: enclosed.sweep.settings });
+    const result = attenuationOf(reading);
+    movedDb.push(moved);
     noiseTakenOut ||= result.noiseTakenOut;
-    rows.push({ ...result, frequencyHz, referenceLevel, enclosedLevel, floorLevel: floor?.medianLevel ?? NaN });
+    rows.push({ ...result, frequencyHz, referenceLevel: reading.referenceLevel, enclosedLevel: reading.enclosedLevel, floorLevel: reading.floor === null ? NaN : reading.floor.medianLevel });
   }
   return {
-    pair: { enclosed: enclosed.traceId, reference: opening.traceId, closing: closing?.traceId ?? null, noise: enclosedFloor.noiseTraceId },
-    style: style.style, floorSource: enclosedFloor.source, rows, gaps, stepHz: medianStepHz(enclosed.sweep.frequencyHz),
-    driftDb: closing === null ? null : driftOf(differences, style.style),
+    pair: { enclosed: enclosed.traceId, reference: opening.traceId, closing: closing === null ? null : closing.traceId, noise: enclosedFloor.noiseTraceId },
+    style, floorSource: enclosedFloor.source, rows, gaps, stepHz: medianStepHz(enclosed.sweep.frequencyHz), driftDb: closing === null ? null : driftOf(movedDb, style),
     doubts: noiseTakenOut ? [{ code: 'noise-taken-out', weight: 'note', message: 'Near the floor the noise power was taken out of power-averaged readings.' }] : [],
   };
 }

@@ -44,19 +44,32 @@ function withoutNoise(level: number, noisePowerLevel: number): number {
  * @returns attenuation in dB with its kind, ceiling (NaN without a floor) and excess.
  */
 export function attenuationOf(reading: Reading): Attenuation {
-  const { referenceLevel, enclosedLevel, floor, leakageLevel, correctionDb } = reading;
+  const { referenceLevel, floor, correctionDb } = reading;
   const from = (level: number): number => referenceLevel - level + correctionDb;
-  const bounding = floor === null ? NaN : floor.thresholdLevel + allowanceAtThresholdDb(floor.looks);
-  const ceilingDb = from(bounding);
-  if (floor !== null && enclosedLevel < floor.thresholdLevel) return { attenuationDb: ceilingDb, atLeast: true, ceilingDb, excessDb: 0, noiseTakenOut: false };
+  const ceilingDb = floor === null ? NaN : from(floor.thresholdLevel + allowanceAtThresholdDb(floor.looks));
+  const { level, ...kind } = levelThatCounts(reading);
+  return { attenuationDb: kind.isInNoise ? ceilingDb : from(level), atLeast: kind.isInNoise || kind.isByLeakage, ceilingDb, excessDb: kind.excessDb, noiseTakenOut: kind.noiseTakenOut };
+}
+
+interface CountingLevel {
+  readonly level: number;
+  readonly isInNoise: boolean;
+  readonly isByLeakage: boolean;
+  readonly noiseTakenOut: boolean;
+  readonly excessDb: number;
+}
+
+const farOverNoiseDb = 40;
+
+/** The level that is subtracted, and in which of the cases of equation (6) the reading is. */
+function levelThatCounts({ enclosedLevel, floor, leakageLevel, settings }: Reading): CountingLevel {
+  const plain = { level: enclosedLevel, isInNoise: false, isByLeakage: false, noiseTakenOut: false, excessDb: 0 };
+  if (floor !== null && enclosedLevel < floor.thresholdLevel) return { ...plain, isInNoise: true };
   if (leakageLevel !== null && enclosedLevel < leakageLevel + leakageWithinDb) {
-    const together = decibelsFromFieldRatio(fieldRatioFromDecibels(enclosedLevel) + fieldRatioFromDecibels(leakageLevel));
-    return { attenuationDb: from(together), atLeast: true, ceilingDb, excessDb: 0, noiseTakenOut: false };
+    return { ...plain, isByLeakage: true, level: decibelsFromFieldRatio(fieldRatioFromDecibels(enclosedLevel) + fieldRatioFromDecibels(leakageLevel)) };
   }
-  const overNoiseDb = floor === null ? Infinity : enclosedLevel - floor.noisePowerLevel;
-  if (floor !== null && averagesPower(reading.settings) && overNoiseDb < subtractBelowDb && overNoiseDb > 0) {
-    return { attenuationDb: from(withoutNoise(enclosedLevel, floor.noisePowerLevel)), atLeast: false, ceilingDb, excessDb: 0, noiseTakenOut: true };
-  }
-  const excess = floor === null || overNoiseDb > 40 ? 0 : excessDb(overNoiseDb, floor.looks);
-  return { attenuationDb: from(enclosedLevel), atLeast: false, ceilingDb, excessDb: excess, noiseTakenOut: false };
+  if (floor === null) return plain;
+  const overNoiseDb = enclosedLevel - floor.noisePowerLevel;
+  if (averagesPower(settings) && overNoiseDb < subtractBelowDb && overNoiseDb > 0) return { ...plain, noiseTakenOut: true, level: withoutNoise(enclosedLevel, floor.noisePowerLevel) };
+  return { ...plain, excessDb: overNoiseDb > farOverNoiseDb ? 0 : excessDb(overNoiseDb, floor.looks) };
 }

@@ -1,3 +1,5 @@
+import { valueAt } from '@leeside/units/value-at';
+
 /**
  * Running median of a window that is kept as an ordered list: insertion by binary search, O(n·w) moves of a small typed array,
  * which the processor does in one copy.
@@ -7,7 +9,7 @@ function placeOf(window: Float32Array, length: number, value: number): number {
   let high = length;
   while (low < high) {
     const middle = (low + high) >> 1;
-    if ((window[middle] ?? 0) < value) low = middle + 1;
+    if (valueAt(window, middle) < value) low = middle + 1;
     else high = middle;
   }
   return low;
@@ -32,14 +34,14 @@ export function runningQuantile(level: Float32Array, width: number, quantile: nu
   for (let bin = 0; bin < count; bin += 1) {
     const wanted = Math.min(Math.max(bin - half, 0), count - size);
     for (; start < wanted; start += 1) {
-      const gone = placeOf(window, size, level[start] ?? 0);
+      const gone = placeOf(window, size, valueAt(level, start));
       window.copyWithin(gone, gone + 1, size);
-      const come = level[start + size] ?? 0;
+      const come = valueAt(level, start + size);
       const place = placeOf(window, size - 1, come);
       window.copyWithin(place + 1, place, size - 1);
       window[place] = come;
     }
-    result[bin] = window[rank] ?? NaN;
+    result[bin] = valueAt(window, rank);
   }
   return result;
 }

@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import type { Sweep } from '@leeside/trace-reading/sweep';
 import { carrierOverThresholdDb, findCarriers, floorBesideCarriers } from './carriers.js';
 import { floorAt, noiseFloorOf, type NoiseFloor } from './noise-floor.js';
@@ -14,8 +15,8 @@ export interface SweepStyle {
 function isSignalThroughout(sweep: Sweep, noise: NoiseFloor, marginDb: number): boolean {
   let strong = 0;
   for (let bin = 0; bin < sweep.level.length; bin += 1) {
-    const { thresholdLevel } = floorAt(noise, sweep.frequencyHz[bin] ?? NaN, marginDb, 1);
-    if ((sweep.level[bin] ?? 0) >= thresholdLevel + carrierOverThresholdDb) strong += 1;
+    const { thresholdLevel } = floorAt(noise, valueAt(sweep.frequencyHz, bin), marginDb, 1);
+    if (valueAt(sweep.level, bin) >= thresholdLevel + carrierOverThresholdDb) strong += 1;
   }
   return strong * 2 >= sweep.level.length;
 }
@@ -32,7 +33,7 @@ export function sweepStyle(sweep: Sweep, noise: NoiseFloor | null, marginDb = 6)
   if (noise !== null && isSignalThroughout(sweep, noise, marginDb)) return continuous;
   const rough = noise ?? noiseFloorOf(sweep.frequencyHz, sweep.level);
   if (rough === null) return continuous;
-  const frequencyOf = (bin: number): number => sweep.frequencyHz[bin] ?? NaN;
+  const frequencyOf = (bin: number): number => valueAt(sweep.frequencyHz, bin);
   const first = findCarriers(sweep, rough, marginDb).map(frequencyOf);
   if (first.length === 0) return continuous;
   const ownFloor = floorBesideCarriers(sweep, first);

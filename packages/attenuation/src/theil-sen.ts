@@ -1,3 +1,5 @@
+import { valueAt } from '@leeside/units/value-at';
+
 const mostPoints = 2001;
 const fewestPoints = 5;
 
@@ -16,17 +18,17 @@ export function theilSenSlope(x: readonly number[], y: readonly number[]): numbe
   const slopes = new Float64Array((chosen.length * (chosen.length - 1)) / 2);
   let count = 0;
   for (let one = 0; one < chosen.length; one += 1) {
-    const xOne = x[chosen[one] ?? 0] ?? NaN;
-    const yOne = y[chosen[one] ?? 0] ?? NaN;
+    const xOne = x[valueAt(chosen, one)] ?? NaN;
+    const yOne = y[valueAt(chosen, one)] ?? NaN;
     for (let other = one + 1; other < chosen.length; other += 1) {
-      const run = (x[chosen[other] ?? 0] ?? NaN) - xOne;
+      const run = valueAt(x, valueAt(chosen, other)) - xOne;
       if (run === 0) continue;
-      slopes[count] = ((y[chosen[other] ?? 0] ?? NaN) - yOne) / run;
+      slopes[count] = (valueAt(y, valueAt(chosen, other)) - yOne) / run;
       count += 1;
     }
   }
   if (count === 0) return null;
   const sorted = slopes.subarray(0, count).sort();
   const middle = count >> 1;
-  return count % 2 === 1 ? (sorted[middle] ?? null) : ((sorted[middle - 1] ?? 0) + (sorted[middle] ?? 0)) / 2;
+  return count % 2 === 1 ? (sorted[middle] ?? null) : (valueAt(sorted, middle - 1) + valueAt(sorted, middle)) / 2;
 }

@@ -87,11 +87,15 @@ async function writeBands(trx: Database, labId: string, curveId: string, bands: 
   if (bands.length === 0) return;
   const origin: { sample_id: string | null; lot_id: string | null; design_id: string | null } | undefined = await trx('curves').leftJoin('samples', 'samples.id', 'curves.sample_id').leftJoin('lots', 'lots.id', 'samples.lot_id')
     .where('curves.id', curveId).first('curves.sample_id', 'samples.lot_id', trx.raw('coalesce(samples.design_id, lots.design_id) as design_id'));
-  await trx('bands').insert(bands.map((band, place) => ({
-    curve_id: curveId, place, lab_id: labId, sample_id: origin?.sample_id ?? null, lot_id: origin?.lot_id ?? null, design_id: origin?.design_id ?? null, kind: band.kind, from_hz: band.fromHz, to_hz: band.toHz,
-    lowest: band.lowest && json(band.lowest), lowest_db: band.lowest?.attenuationDb ?? null, at_least: band.lowest?.atLeast ?? null, median_db: band.medianDb, median_at_least: band.medianAtLeast,
-    q10_db: band.q10Db, q10_at_least: band.q10AtLeast, bound_share: band.boundShare, slope_db_per_decade: band.slopeDbPerDecade,
-  })));
+  await trx('bands').insert(bands.map((band, place) => ({ curve_id: curveId, place, lab_id: labId, ...(origin ?? {}), ...bandColumns(band) })));
+}
+
+function bandColumns(band: BandResult): Record<string, unknown> {
+  const { lowest } = band;
+  return {
+    kind: band.kind, from_hz: band.fromHz, to_hz: band.toHz, lowest: lowest && json(lowest), lowest_db: lowest && lowest.attenuationDb, at_least: lowest && lowest.atLeast,
+    median_db: band.medianDb, median_at_least: band.medianAtLeast, q10_db: band.q10Db, q10_at_least: band.q10AtLeast, bound_share: band.boundShare, slope_db_per_decade: band.slopeDbPerDecade,
+  };
 }
 
 /** Keeps a computed curve as a new revision; false where the curve was marked anew meanwhile, and nothing was changed. */

@@ -20,7 +20,7 @@ export interface AffectedCurves {
  * The work is announced unless files of the session are still to be read: the last of them announces it.
  */
 export async function markCurvesPending(trx: Database, { labId, sessionId }: { labId: string; sessionId: string }, affected: AffectedCurves | null): Promise<void> {
-  await trx('sessions').where({ id: sessionId, lab_id: labId }).forUpdate().first('id');
+  await trx('sessions').where({ id: sessionId, lab_id: labId }).forNoKeyUpdate().first('id');
   await trx.raw(`
     delete from curves using (select 1) as once
     where curves.session_id = :sessionId and not exists (

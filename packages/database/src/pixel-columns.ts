@@ -1,10 +1,12 @@
+import { valueAt } from '@leeside/units/value-at';
+
 /** First index whose frequency is not below the bound. */
 function firstNotBelow(axisHz: Float64Array, boundHz: number): number {
   let low = 0;
   let high = axisHz.length;
   while (low < high) {
     const middle = (low + high) >> 1;
-    if ((axisHz[middle] ?? 0) < boundHz) low = middle + 1;
+    if (valueAt(axisHz, middle) < boundHz) low = middle + 1;
     else high = middle;
   }
   return low;
@@ -43,8 +45,8 @@ export function indicesForPixels(values: Float32Array, { from, to }: { from: num
     let lowest = start;
     let highest = start;
     for (let at = start + 1; at < end; at += 1) {
-      if (!((values[at] ?? NaN) >= (values[lowest] ?? NaN))) lowest = at;
-      if (!((values[at] ?? NaN) <= (values[highest] ?? NaN))) highest = at;
+      if (!(valueAt(values, at) >= valueAt(values, lowest))) lowest = at;
+      if (!(valueAt(values, at) <= valueAt(values, highest))) highest = at;
     }
     chosen.push(Math.min(lowest, highest));
     if (lowest !== highest) chosen.push(Math.max(lowest, highest));

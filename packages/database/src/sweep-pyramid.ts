@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import type { KeptAxis } from './frequency-axis.js';
 
 const binCounts = [1024, 4096, 16_384, 65_536] as const;
@@ -21,7 +22,7 @@ export function buildPyramid(level: Float32Array): Float32Array | null {
       let lowest = Infinity;
       let highest = -Infinity;
       for (let at = start; at < end; at += 1) {
-        const value = level[at] ?? NaN;
+        const value = valueAt(level, at);
         if (value < lowest) lowest = value;
         if (value > highest) highest = value;
       }

@@ -22,6 +22,17 @@ async function* filesBelow(folder: string): AsyncIterable<string> {
   }
 }
 
+async function sweepFolder(folder: string, olderThanMs: number): Promise<number> {
+  let swept = 0;
+  for (const name of await readdir(folder)) {
+    const facts = await stat(join(folder, name)).catch(() => null);
+    if (facts === null || Date.now() - facts.mtimeMs < olderThanMs) continue;
+    await rm(join(folder, name), { force: true });
+    swept += 1;
+  }
+  return swept;
+}
+
 /** A folder as object store: bytes go to a temporary file, are synced to disk and then renamed into place. */
 export async function openFolderStore(folder: string): Promise<ObjectStore> {
   const [keptFolder, temporaryFolder] = [join(folder, 'kept'), join(folder, 'temporary')];
@@ -59,19 +70,9 @@ export async function openFolderStore(folder: string): Promise<ObjectStore> {
     await syncFolder(dirname(place));
   };
 
-  const sweepTemporary = async (olderThanMs: number): Promise<number> => {
-    let swept = 0;
-    for (const name of await readdir(temporaryFolder)) {
-      const facts = await stat(join(temporaryFolder, name)).catch(() => null);
-      if (facts === null || Date.now() - facts.mtimeMs < olderThanMs) continue;
-      await rm(join(temporaryFolder, name), { force: true });
-      swept += 1;
-    }
-    return swept;
-  };
-
   return {
-    putTemporary, keep, sweepTemporary,
+    putTemporary, keep,
+    sweepTemporary: (olderThanMs) => sweepFolder(temporaryFolder, olderThanMs),
     discard: (object) => rm(temporaryPlace(object), { force: true }),
     read: async (key) => readFile(placeOf(key)).catch((fault: unknown) => {
       if (isMissing(fault)) return null;

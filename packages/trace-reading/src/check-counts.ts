@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { ask, type Notebook } from './notebook.js';
 import { statedPoints, type StatedRange } from './stated-range.js';
 import type { Preamble } from './preamble.js';
@@ -17,7 +18,7 @@ const slackSteps = 2;
 /** The preamble's start and stop are not those of the rows: a person decides. */
 export function checkRange(notebook: Notebook, range: StatedRange | null, frequencyHz: Float64Array, line: number): void {
   if (range === null || range.unit === null || Number.isNaN(range.stopHz) || frequencyHz.length < 2) return;
-  const [first, last] = [Math.min(frequencyHz[0] ?? 0, frequencyHz.at(-1) ?? 0), Math.max(frequencyHz[0] ?? 0, frequencyHz.at(-1) ?? 0)];
+  const [first, last] = [Math.min(valueAt(frequencyHz, 0), frequencyHz.at(-1) ?? 0), Math.max(valueAt(frequencyHz, 0), frequencyHz.at(-1) ?? 0)];
   const slackHz = Math.max((slackSteps * (range.stopHz - range.startHz)) / (frequencyHz.length - 1), 2e-3 * (range.stopHz - range.startHz));
   if (Math.abs(first - range.startHz) <= slackHz && Math.abs(last - range.stopHz) <= slackHz) return;
   ask(notebook, {

@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { decibelsFromFieldRatio } from '@leeside/units/decibels';
 import { levelDbmFrom, type KeptLevelUnit } from '@leeside/units/level-unit';
 import { doubt, type Notebook } from './notebook.js';
@@ -24,7 +25,7 @@ function noteOddities(notebook: Notebook, { frequencyHz, level }: Sweep, name: s
   if (level.length === 1) doubt(notebook, 'one-point', 'note', `"${name}" has only one point: a spot reading.`);
   if (level.length > 2 && level.every((value) => value === level[0])) doubt(notebook, 'all-equal', 'doubt', `All values of "${name}" are equal.`);
   if ((frequencyHz.at(-1) ?? 0) > 1e12) doubt(notebook, 'frequency-implausible', 'doubt', 'Frequencies reach above 1 THz: the unit may be wrong.');
-  const steps = Array.from({ length: Math.max(0, Math.min(frequencyHz.length - 1, 5000)) }, (_, at) => (frequencyHz[at + 1] ?? 0) - (frequencyHz[at] ?? 0));
+  const steps = Array.from({ length: Math.max(0, Math.min(frequencyHz.length - 1, 5000)) }, (_, at) => valueAt(frequencyHz, at + 1) - valueAt(frequencyHz, at));
   const middle = [...steps].sort((one, other) => one - other)[steps.length >> 1] ?? 0;
   const gap = steps.findIndex((step) => step > gapSteps * middle);
   if (steps.length > 10 && gap >= 0 && middle > 0) doubt(notebook, 'wide-step', 'note', `There is a gap between ${frequencyHz[gap]} and ${frequencyHz[gap + 1]} Hz.`);
@@ -45,18 +46,18 @@ const mostMissing = 0.01;
 /** Makes a sweep: values that the analyzer marked as none become gaps that are said, levels are converted and rounded to float32. */
 export function sweepFromPoints(notebook: Notebook, { name, points, unit, isLinearRatio = false, impedanceOhm, settings }: SweepToMake): Sweep {
   const convert = converter(unit, impedanceOhm, isLinearRatio);
-  const isKept = (at: number): boolean => Number.isFinite(points.level[at] ?? NaN) && Number.isFinite(points.frequencyHz[at] ?? NaN) && (!(isLinear(unit) || isLinearRatio) || (points.level[at] ?? 0) > 0);
+  const isKept = (at: number): boolean => Number.isFinite(valueAt(points.level, at)) && Number.isFinite(valueAt(points.frequencyHz, at)) && (!(isLinear(unit) || isLinearRatio) || valueAt(points.level, at) > 0);
   const kept = Uint32Array.from(Array.from({ length: points.level.length }, (_, at) => at).filter(isKept));
   const missing = points.level.length - kept.length;
   if (missing > 0) {
     const first = Array.from({ length: points.level.length }, (_, at) => at).find((at) => !isKept(at)) ?? 0;
-    doubt(notebook, 'no-value', missing > mostMissing * points.level.length ? 'doubt' : 'note', `${missing} point${missing === 1 ? ' has' : 's have'} no value (first: line ${(points.lines[first] ?? 0) + 1}).`, (points.lines[first] ?? 0) + 1);
+    doubt(notebook, 'no-value', missing > mostMissing * points.level.length ? 'doubt' : 'note', `${missing} point${missing === 1 ? ' has' : 's have'} no value (first: line ${valueAt(points.lines, first) + 1}).`, valueAt(points.lines, first) + 1);
   }
   const ordered = orderPoints(notebook, {
-    frequencyHz: Float64Array.from(kept, (at) => points.frequencyHz[at] ?? NaN), level: Float64Array.from(kept, (at) => convert(points.level[at] ?? NaN)), lines: Uint32Array.from(kept, (at) => points.lines[at] ?? 0),
+    frequencyHz: Float64Array.from(kept, (at) => valueAt(points.frequencyHz, at)), level: Float64Array.from(kept, (at) => convert(valueAt(points.level, at))), lines: Uint32Array.from(kept, (at) => valueAt(points.lines, at)),
   });
   const made = makeSweep({ frequencyHz: ordered.frequencyHz, level: Float32Array.from(ordered.level), levelUnit: keptUnit(unit), settings });
-  if (made.kind === 'fault') throw refuse(made.fault.reason === 'empty' ? 'no-data' : 'bad-number', `"${name}" cannot be a sweep: ${made.fault.reason} at row ${made.fault.row + 1}.`, (ordered.lines[made.fault.row] ?? 0) + 1);
+  if (made.kind === 'fault') throw refuse(made.fault.reason === 'empty' ? 'no-data' : 'bad-number', `"${name}" cannot be a sweep: ${made.fault.reason} at row ${made.fault.row + 1}.`, valueAt(ordered.lines, made.fault.row) + 1);
   noteOddities(notebook, made.sweep, name);
   return made.sweep;
 }
