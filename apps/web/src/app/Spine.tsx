@@ -25,7 +25,7 @@ export function Spine() {
   const { pathname } = useLocation();
   const leave = useLeave();
   return (
-    <header className="stitched not-printed sticky top-0 hidden h-dvh w-36 shrink-0 flex-col py-6 ps-5 desk:flex">
+    <header className="stitched not-printed sticky top-0 hidden h-dvh w-40 shrink-0 flex-col py-6 ps-5 desk:flex">
       <Link to="/" className="no-underline"><Wordmark /></Link>
       <nav aria-label="Places" className="mt-9">
         <ul className="list-none">

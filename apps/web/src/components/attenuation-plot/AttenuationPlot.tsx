@@ -8,7 +8,7 @@ import { useDarkTheme } from '../plot/use-dark-theme';
 import { readerLocale } from '../reader-locale';
 import { attenuationColumns } from './attenuation-data';
 import { attenuationOptions, attenuationSeriesData } from './attenuation-options';
-import type { Segment } from './requirement-wall';
+import { wallTop, type Segment } from './requirement-wall';
 
 export interface PlotView { window: FrequencyWindow; axisKind: AxisKind; width: number; joined: boolean }
 export interface PlotHandlers { onCursor: (hz: number) => void; onZoom: (window: FrequencyWindow) => void; onReset: () => void }
@@ -28,7 +28,7 @@ export function AttenuationPlot({ points, gaps, segments, view, cursor, handlers
   const data = useMemo(() => attenuationSeriesData(columns), [columns]);
   const { window, axisKind, width, joined } = view;
   const options = useMemo(() => {
-    const required = segments.flatMap(({ fromDb, toDb }) => [fromDb, toDb]);
+    const required = segments.flatMap((segment) => wallTop(segment, window) ?? []).map(({ db }) => db);
     const range = decibelRange([points.attenuationDb, points.ceilingDb, columns.upperDb, columns.lowerDb, required], 12, 4);
     return attenuationOptions({ columns, segments, joined, window, axisKind, width, range, colours: plotColours(), locale: readerLocale(), theme: dark ? 'dark' : 'light' });
   }, [columns, points, segments, joined, window, axisKind, width, dark]);

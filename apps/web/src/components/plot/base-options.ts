@@ -46,7 +46,7 @@ export function baseOptions({ window, axisKind, range, unit, colours, width, loc
         grid: { show: false }, ticks: { stroke: colours.ink, width: 1, size: 6 }, border: { show: true, stroke: colours.ink, width: 1 },
       },
       {
-        font: face, stroke: colours.faded, size: width < narrowPx ? 50 : 64, gap: 6,
+        font: face, stroke: colours.faded, size: width < narrowPx ? 62 : 66, gap: 6,
         splits: () => decibelTicks(range, 6),
         values: (_, splits) => decibelTexts(splits, unit, locale),
         grid: { stroke: colours.rule, width: 1 }, ticks: { show: false },

@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { clampWindow, followWindow, nearestIndex, zoomWindow } from './frequency-window';
+import { clampWindow, followWindow, nearestIndex, widened, zoomWindow } from './frequency-window';
 
 const whole = { fromHz: 10e6, toHz: 1e9 };
 
@@ -31,4 +31,10 @@ test('the nearest index', () => {
   const axis = [10, 20, 40];
   expect([5, 14, 16, 31, 99].map((hz) => nearestIndex(axis, hz))).toEqual([0, 0, 1, 2, 2]);
   expect(nearestIndex([], 1)).toBe(-1);
+});
+
+test('a widened window reaches past both edges by the same share', () => {
+  const { fromHz, toHz } = widened({ fromHz: 10e6, toHz: 1e9 });
+  expect(10e6 / fromHz).toBeCloseTo(toHz / 1e9, 9);
+  expect(fromHz).toBeLessThan(10e6);
 });

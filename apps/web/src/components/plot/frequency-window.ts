@@ -44,3 +44,11 @@ export function nearestIndex(frequencyHz: ArrayLike<number>, hz: number): number
   const highHz = frequencyHz[high] ?? 0;
   return Math.abs(hz - lowHz) <= Math.abs(highHz - hz) ? low : high;
 }
+
+const neighbourShare = 0.05;
+
+/** A little more than a window, so that the lines run on to its edges. */
+export function widened({ fromHz, toHz }: FrequencyWindow): FrequencyWindow {
+  const ratio = (toHz / fromHz) ** neighbourShare;
+  return { fromHz: fromHz / ratio, toHz: toHz * ratio };
+}

@@ -19,7 +19,7 @@ import type { PlotCursorState } from './use-plot-cursor';
 
 interface CurvePlotsProps { curve: Curve; points: CurvePointsBody; segments: readonly Segment[]; whole: FrequencyWindow; view: CurveView; cursor: PlotCursorState; width: number }
 
-function usePlotActions({ curve, points, whole, view, cursor }: CurvePlotsProps): PlotActions {
+function usePlotActions({ curve, whole, view, cursor }: CurvePlotsProps): PlotActions {
   const window = view.zoom ?? whole;
   const toLowest = (): void => {
     if (!curve.lowest) return;
@@ -31,8 +31,7 @@ function usePlotActions({ curve, points, whole, view, cursor }: CurvePlotsProps)
     view.setZoom(next.fromHz === whole.fromHz && next.toHz === whole.toHz ? null : next);
   };
   return {
-    step: cursor.step, zoom, toLowest, reset: () => view.setZoom(null),
-    toEnd: (end) => cursor.moveTo(points.frequencyHz.at(end === 'first' ? 0 : -1) ?? 0),
+    step: cursor.step, zoom, toLowest, toEnd: cursor.toEnd, reset: () => view.setZoom(null),
   };
 }
 
@@ -52,7 +51,7 @@ export function CurvePlots(props: CurvePlotsProps) {
         <CursorReadout reading={cursor.reading} />
         <PlotTools axisKind={view.axisKind} zoomed={view.zoom !== null} onAxisKind={view.setAxisKind} onZoom={actions.zoom} onReset={actions.reset} onLowest={actions.toLowest} />
       </div>
-      <PlotKeys at={cursor.at} count={points.frequencyHz.length} aloud={aloud} summary={curveSummary(curve, readerLocale())} actions={actions}>
+      <PlotKeys at={cursor.at} count={cursor.count} aloud={aloud} summary={curveSummary(curve, readerLocale())} actions={actions}>
         <AttenuationPlot points={points} gaps={curve.gaps} segments={segments} view={plotView} cursor={cursor.onCurve} handlers={handlers} />
         <p className="mt-3 mb-1 border-t border-rule pt-2 text-xs text-faded">The levels that it came from</p>
         {levels.data ? <LevelsPlot levels={levels.data} gaps={curve.gaps} view={plotView} cursor={cursor.beside} handlers={handlers} /> : <div className="h-[230px]" />}

@@ -28,7 +28,7 @@ export function CurveRemarks({ curve }: { curve: Curve }) {
 export function ThinnedRemark({ shown, all }: { shown: number; all: number }) {
   return (
     <Remarks about="the numbers">
-      <Remark>{shown} of {all} points in the whole curve: outside the window none, inside it the lowest and the highest of each pixel column. Zoom in for more; the CSV holds them all.</Remark>
+      <Remark>Shown are {shown} of the curve’s {all} points. Where a pixel column holds more than two, its lowest and its highest stand for it; zoom in for more. The CSV holds them all.</Remark>
     </Remarks>
   );
 }

@@ -10,6 +10,7 @@ import { useWidth } from '../../components/plot/use-width';
 import { CurvePlots } from './CurvePlots';
 import { CurveRemarks, ThinnedRemark } from './CurveRemarks';
 import { CurveTable } from './CurveTable';
+import { pointsWithin } from './points-within';
 import { useCurveView } from './use-curve-view';
 import { usePlotCursor } from './use-plot-cursor';
 import { wholeWindow } from './whole-window';
@@ -17,6 +18,7 @@ import { wholeWindow } from './whole-window';
 const nothing = { frequencyHz: [], attenuationDb: [], atLeast: [], atMostDb: [], ceilingDb: [], expandedUncertaintyDb: [], requiredDb: [] };
 
 const noSegments: never[] = [];
+const everything = { fromHz: 0, toHz: Infinity };
 
 function useSegments(requirementId: string | null) {
   const requirement = useApiQuery(getRequirement, { params: { id: requirementId ?? '' } }, { enabled: requirementId !== null, staleTime: Infinity });
@@ -33,8 +35,10 @@ export function CurveSheet({ curve }: { curve: Curve }) {
   const zoomed = useCurvePoints(curve.id, view.zoom, width, curve.revision);
   const points = zoomed.data ?? overview.data ?? nothing;
   const whole = useMemo(() => wholeWindow(overview.data?.frequencyHz ?? []), [overview.data]);
-  const cursor = usePlotCursor(points, curve.lowest?.frequencyHz ?? 0);
-  const shown = points.frequencyHz.length;
+  const { fromHz, toHz } = view.zoom ?? everything;
+  const inside = useMemo(() => pointsWithin(points, { fromHz, toHz }), [points, fromHz, toHz]);
+  const cursor = usePlotCursor(inside, curve.lowest?.frequencyHz ?? 0);
+  const shown = inside.frequencyHz.length;
   return (
     <>
       <Passage title="Attenuation" remarks={<CurveRemarks curve={curve} />}>
@@ -47,7 +51,7 @@ export function CurveSheet({ curve }: { curve: Curve }) {
         </div>
       </Passage>
       <Passage title="In numbers" count={shown} remarks={shown < curve.pointCount && <ThinnedRemark shown={shown} all={curve.pointCount} />}>
-        {whole && <CurveTable points={points} cursorAt={cursor.at} onCursor={cursor.moveTo} rows={view.rows} onRows={view.setRows} />}
+        {whole && <CurveTable points={inside} cursorAt={cursor.at} onCursor={cursor.moveTo} rows={view.rows} onRows={view.setRows} />}
       </Passage>
     </>
   );
