@@ -41,7 +41,7 @@ describe('the permission table, over every call', () => {
     const [mine, other] = [browsers.get('engineer') as Browser, browsers.get('qa') as Browser];
     const call = (headers: Record<string, string>): request.Test => request(api.server)[endpoint.method](`/api/v1${pathOf(endpoint.path)}`).set('Cookie', mine.cookies).set(headers);
     for (const headers of [{}, { 'X-CSRF-Token': other.csrfToken }, { 'X-CSRF-Token': mine.csrfToken, 'Sec-Fetch-Site': 'cross-site' }, { 'X-CSRF-Token': mine.csrfToken, Origin: 'https://elsewhere.example' }]) {
-      const answer = await call(headers as Record<string, string>);
+      const answer = await call(headers);
       expect([answer.status, (answer.body as { type: string }).type]).toEqual([403, '/problems/csrf']);
     }
   });

@@ -15,7 +15,8 @@ export async function freshDatabase(): Promise<{ url: string; drop: () => Promis
   const name = `test_${randomBytes(6).toString('hex')}`;
   const asAdmin = async (statement: string): Promise<void> => {
     const db = openDatabase({ url: adminUrl, poolSize: 1 });
-    await db.raw(statement).finally(() => db.destroy());
+    await db.raw(statement);
+    await db.destroy();
   };
   await asAdmin(`create database ${name}`);
   const url = new URL(adminUrl);

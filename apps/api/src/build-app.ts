@@ -1,4 +1,3 @@
-import { randomUUID } from 'node:crypto';
 import { endpoints } from '@leeside/contracts/endpoints';
 import cookieParser from 'cookie-parser';
 import express, { type Express, type Router } from 'express';
@@ -17,6 +16,7 @@ import { mountToday } from './features/today/today-routes.js';
 import { mountTraces } from './features/traces/trace-routes.js';
 import { answerProblems, answerUnknownRoute } from './http/answer-problems.js';
 import { openApiDocument } from './http/openapi-document.js';
+import { requestIdOf, tellRequestId } from './http/request-id.js';
 import { securityHeaders } from './http/security-headers.js';
 import { servePage } from './http/serve-page.js';
 
@@ -36,14 +36,11 @@ export function buildApp(tools: ApiTools): Express {
   const headers = securityHeaders(tools.baseUrl);
   app.disable('x-powered-by').set('query parser', 'simple').set('etag', false).set('trust proxy', 'loopback');
   app.use(pinoHttp({
-    logger: tools.log, genReqId: () => randomUUID(), quietReqLogger: true,
+    logger: tools.log, genReqId: requestIdOf, quietReqLogger: true,
     serializers: { req: (request: { method: string; url: string; id: string }) => ({ id: request.id, method: request.method, path: request.url.split('?')[0] }), res: (response: { statusCode: number }) => ({ status: response.statusCode }) },
     customLogLevel: (_request, response, fault) => (fault || response.statusCode >= 500 ? 'error' : 'debug'),
   }));
-  app.use((request, response, next) => {
-    response.set('X-Request-Id', String(request.id));
-    next();
-  });
+  app.use(tellRequestId);
   app.use(headers.api);
   app.use('/api/v1', cookieParser(), express.json({ limit: '2mb' }), apiRouter(tools), answerUnknownRoute);
   app.use('/api', answerUnknownRoute);

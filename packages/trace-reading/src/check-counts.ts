@@ -18,8 +18,10 @@ const slackSteps = 2;
 /** The preamble's start and stop are not those of the rows: a person decides. */
 export function checkRange(notebook: Notebook, range: StatedRange | null, frequencyHz: Float64Array, line: number): void {
   if (range === null || range.unit === null || Number.isNaN(range.stopHz) || frequencyHz.length < 2) return;
-  const [first, last] = [Math.min(valueAt(frequencyHz, 0), frequencyHz.at(-1) ?? 0), Math.max(valueAt(frequencyHz, 0), frequencyHz.at(-1) ?? 0)];
-  const slackHz = Math.max((slackSteps * (range.stopHz - range.startHz)) / (frequencyHz.length - 1), 2e-3 * (range.stopHz - range.startHz));
+  const ends = [valueAt(frequencyHz, 0), valueAt(frequencyHz, frequencyHz.length - 1)];
+  const [first, last] = [Math.min(...ends), Math.max(...ends)];
+  const spanHz = range.stopHz - range.startHz;
+  const slackHz = Math.max((slackSteps * spanHz) / (frequencyHz.length - 1), 2e-3 * spanHz);
   if (Math.abs(first - range.startHz) <= slackHz && Math.abs(last - range.stopHz) <= slackHz) return;
   ask(notebook, {
     id: 'range', code: 'range-mismatch', message: `The preamble says ${range.startHz} to ${range.stopHz} Hz, the rows run from ${first} to ${last} Hz.`, lines: [line],

@@ -31,7 +31,7 @@ export function chooseBlocks(notebook: Notebook, lines: TextLines, blocks: reado
   for (const { block } of titled) {
     if (chosen.includes(block)) continue;
     notebook.transcription.rowsSkipped += block.rowCount;
-    doubt(notebook, 'other-table', 'note', `Lines ${block.firstLine + 1} to ${block.lastLine + 1} are another table and were passed over.`, block.firstLine + 1);
+    doubt(notebook, { code: 'other-table', weight: 'note', message: `Lines ${block.firstLine + 1} to ${block.lastLine + 1} are another table and were passed over.`, line: block.firstLine + 1 });
   }
   noteTail(notebook, lines, blocks.at(-1));
   return chosen;
@@ -44,5 +44,5 @@ function noteTail(notebook: Notebook, lines: TextLines, last: DataBlock | undefi
   const rest = Array.from({ length: lines.count - last.lastLine - 1 }, (_, at) => last.lastLine + 1 + at).filter((line) => lineAt(lines, line).trim() !== '' && !knownEnd.test(lineAt(lines, line)));
   const [first] = rest;
   if (first === undefined) return;
-  doubt(notebook, 'lines-after-data', 'note', `${rest.length} line${rest.length === 1 ? '' : 's'} after the data ${rest.length === 1 ? 'was' : 'were'} passed over: ${first + 1} to ${(rest.at(-1) ?? first) + 1}.`, first + 1);
+  doubt(notebook, { code: 'lines-after-data', weight: 'note', message: `${rest.length} line${rest.length === 1 ? '' : 's'} after the data ${rest.length === 1 ? 'was' : 'were'} passed over: ${first + 1} to ${(rest.at(-1) ?? first) + 1}.`, line: first + 1 });
 }

@@ -14,25 +14,40 @@ export interface ColumnFacts {
   readonly risingShare: number;
 }
 
+interface Tally {
+  first: number;
+  last: number;
+  lowest: number;
+  highest: number;
+  count: number;
+  rising: number;
+  falling: number;
+  unitSteps: number;
+}
+
+function countStep(tally: Tally, value: number): void {
+  if (value > tally.last) tally.rising += 1;
+  if (value < tally.last) tally.falling += 1;
+  if (value - tally.last === 1) tally.unitSteps += 1;
+}
+
 /** Looks at a column once. Cells without a value are passed over. */
 export function columnFacts(column: Float64Array): ColumnFacts {
-  let [first, last, lowest, highest] = [NaN, NaN, Infinity, -Infinity];
-  let [count, rising, falling, unitSteps] = [0, 0, 0, 0];
+  const tally: Tally = { first: NaN, last: NaN, lowest: Infinity, highest: -Infinity, count: 0, rising: 0, falling: 0, unitSteps: 0 };
   for (const value of column) {
     if (Number.isNaN(value)) continue;
-    if (count === 0) first = value;
-    else if (value > last) {
-      rising += 1;
-      if (value - last === 1) unitSteps += 1;
-    } else if (value < last) falling += 1;
-    last = value;
-    count += 1;
-    if (value < lowest) lowest = value;
-    if (value > highest) highest = value;
+    if (tally.count === 0) tally.first = value;
+    else countStep(tally, value);
+    tally.last = value;
+    tally.count += 1;
+    tally.lowest = Math.min(tally.lowest, value);
+    tally.highest = Math.max(tally.highest, value);
   }
-  const steps = Math.max(0, count - 1);
+  const steps = Math.max(0, tally.count - 1);
+  const isEvery = (some: number): boolean => steps > 0 && some === steps;
+  const { first, last, lowest, highest } = tally;
   return {
-    isAscending: steps > 0 && rising === steps, isDescending: steps > 0 && falling === steps, isIndex: steps > 0 && unitSteps === steps && (first === 0 || first === 1), isConstant: count > 0 && lowest === highest,
-    isEmpty: count === 0, first, last, lowest, highest, risingShare: steps === 0 ? 0 : rising / steps,
+    isAscending: isEvery(tally.rising), isDescending: isEvery(tally.falling), isIndex: isEvery(tally.unitSteps) && (first === 0 || first === 1), isConstant: tally.count > 0 && lowest === highest,
+    isEmpty: tally.count === 0, first, last, lowest, highest, risingShare: steps === 0 ? 0 : tally.rising / steps,
   };
 }

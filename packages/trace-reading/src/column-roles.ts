@@ -120,7 +120,7 @@ function uniqueNames(notebook: Notebook, traces: readonly TraceColumn[]): TraceC
     const times = (seen.get(trace.name) ?? 0) + 1;
     seen.set(trace.name, times);
     if (times === 1) return trace;
-    doubt(notebook, 'same-name-twice', 'note', `Two traces are named "${trace.name}"; the later one is shown with a number.`);
+    doubt(notebook, { code: 'same-name-twice', weight: 'note', message: `Two traces are named "${trace.name}"; the later one is shown with a number.` });
     return { ...trace, name: `${trace.name} (${times})` };
   });
 }

@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { readCell, type Cell } from './cell-value.js';
 import { refuse } from './reading-fault.js';
 import { readingLimits } from './reading-limits.js';
@@ -18,28 +19,31 @@ export interface DataBlock {
   readonly noValueCount: number;
 }
 
+function pastBlanks(text: string, from: number, end: number): number {
+  let at = from;
+  while (at < end && text.charCodeAt(at) === 32) at += 1;
+  return at;
+}
+
 /** Reads plain rows of numbers without making an object a cell; false where the line needs the slow way. */
 function scanPlainRow(lines: TextLines, line: number, { delimiter, decimalMark }: Separators, row: Float64Array): boolean {
   if (delimiter === ' ') return false;
   const { text } = lines;
-  const end = lines.end[line] ?? 0;
-  const mark = decimalMark.charCodeAt(0);
-  const separator = delimiter.charCodeAt(0);
-  let at = lines.start[line] ?? 0;
+  const [end, mark, separator] = [valueAt(lines.end, line), decimalMark.charCodeAt(0), delimiter.charCodeAt(0)];
+  let at = valueAt(lines.start, line);
   for (let column = 0; column < row.length; column += 1) {
-    while (at < end && text.charCodeAt(at) === 32) at += 1;
-    const value = scanNumber(text, at, end, mark);
-    if (!(Math.abs(value) < 9e36)) return false;
-    at = scanEnd.at;
-    while (at < end && text.charCodeAt(at) === 32) at += 1;
-    const isLast = column === row.length - 1;
-    if (at < end && text.charCodeAt(at) !== separator) return false;
-    if (at >= end && !isLast) return false;
+    const value = scanNumber(text, pastBlanks(text, at, end), end, mark);
+    if (!(Math.abs(value) < largestPlain)) return false;
+    at = pastBlanks(text, scanEnd.at, end);
+    const isAtEnd = at >= end;
+    if (isAtEnd ? column < row.length - 1 : text.charCodeAt(at) !== separator) return false;
     at += 1;
     row[column] = value;
   }
   return at >= end;
 }
+
+const largestPlain = 9e36;
 
 /** Columns that grow as rows come. */
 class GrowingColumns {
@@ -85,10 +89,12 @@ function rejectOutOfRange(row: readonly Cell[], line: number): void {
 
 /** A line in the middle of data that is no row of this width: a fault where data go on after it, the end of the block where they do not. */
 function explainBreak(lines: TextLines, line: number, separators: Separators, width: number): void {
-  const text = lineAt(lines, line);
   const following = lineAt(lines, line + 1);
   const next = isBlank(following) ? null : readRow(following, separators);
-  if (next?.length !== width) return;
+  if (next?.length === width) explainLine(lineAt(lines, line), line, separators, width);
+}
+
+function explainLine(text: string, line: number, separators: Separators, width: number): void {
   const row = readRow(text, separators);
   if (row !== null) throw refuse('ragged-row', `Line ${line + 1} has ${row.length} value${row.length === 1 ? '' : 's'}, expected ${width}.`, line + 1);
   const cells = splitCells(text, separators.delimiter);

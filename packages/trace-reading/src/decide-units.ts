@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { hertzPerUnit, type FrequencyUnit } from '@leeside/units/frequency-unit';
 import { formatFrequency } from '@leeside/units/format-quantity';
 import { ask, decide, doubt, type Notebook } from './notebook.js';
@@ -18,11 +19,11 @@ export interface RowsShown {
   readonly level: readonly number[];
 }
 
-function askConflict<Unit extends string>(notebook: Notebook, id: string, found: readonly Found<Unit>[], rows: RowsShown, show: (unit: Unit) => string): Found<Unit> {
+function askConflict<Unit extends string>(notebook: Notebook, { id, lines, show }: { id: string; lines: readonly number[]; show: (unit: Unit) => string }, found: readonly Found<Unit>[]): Found<Unit> {
   const distinct = found.filter((one, at) => found.findIndex((other) => other.unit === one.unit) === at);
   if (distinct.length === 1 && distinct[0]) return distinct[0];
   const unit = ask(notebook, {
-    id, code: 'unit-conflict', message: `The file names two units: ${distinct.map((one) => `${one.unit} (${one.how})`).join(' and ')}.`, lines: rows.lines,
+    id, code: 'unit-conflict', message: `The file names two units: ${distinct.map((one) => `${one.unit} (${one.how})`).join(' and ')}.`, lines,
     choices: distinct.map((one) => ({ id: one.unit, label: one.unit, sample: show(one.unit) })),
   });
   return { unit, how: 'a person\u2019s answer' };
@@ -53,23 +54,45 @@ const surelyHertz = 1e8;
  * The unit of the frequency column: glued to the cells or in the header, a line of the preamble, start and stop, prose; a column that
  * reaches 10⁸ can only be hertz. Otherwise a question.
  */
-export function decideFrequencyUnit(notebook: Notebook, { headerText, values, preamble, range, rows }: { headerText: string; values: readonly number[]; preamble: Preamble; range: StatedRange | null; rows: RowsShown & { count: number } }): FrequencyUnit {
+export function decideFrequencyUnit(notebook: Notebook, evidence: FrequencyEvidence): FrequencyUnit {
+  const { rows, values } = evidence;
+  const highest = Math.max(valueAt(values, 0), values.at(-1) ?? NaN);
   const show = (unit: FrequencyUnit): string => rows.frequency.map((value) => formatFrequency(value * hertzPerUnit[unit])).join('\n');
-  const inHeader = frequencyUnitOf(headerText) ?? frequencyUnitIn(headerText);
-  const key = entryOf(preamble, 'frequencyUnit');
-  const byKey = key === null ? null : frequencyUnitIn(key.value);
-  const stated: Found<FrequencyUnit>[] = [...(inHeader === null ? [] : [{ unit: inHeader, how: 'the column\u2019s header' }]), ...(byKey === null ? [] : [{ unit: byKey, how: `line ${(key?.line ?? 0) + 1}` }])];
-  const byRange = unitByRange(values, range, rows.count - 1);
-  const found = stated.length > 0 ? askConflict(notebook, 'frequency-unit', [...stated, ...(byRange !== null && stated.every((one) => one.unit !== byRange.unit) ? [byRange] : [])], rows, show) : byRange ?? unitByProse(values, preamble);
-  const highest = Math.max(values[0] ?? NaN, values.at(-1) ?? NaN);
-  const sure = found ?? (highest >= surelyHertz ? { unit: 'Hz' as const, how: 'the values are so large that they can only be hertz' } : null);
-  const unit = sure?.unit ?? ask(notebook, {
+  const found = unitByWords(notebook, evidence, show) ?? unitByRange(values, evidence.range, rows.count - 1) ?? unitByProse(values, evidence.preamble) ?? unitBySize(highest);
+  const unit = found?.unit ?? ask(notebook, {
     id: 'frequency-unit', code: 'unit-missing', message: 'The file does not tell the unit of its frequencies.', lines: rows.lines,
     choices: (['Hz', 'kHz', 'MHz', 'GHz'] as const).filter((one) => highest * hertzPerUnit[one] <= 1e12 && highest * hertzPerUnit[one] >= 1).map((id) => ({ id, label: id, sample: show(id) })),
   });
   notebook.transcription.frequencyUnit = unit;
-  decide(notebook, 'frequencyUnit', sure?.how ?? 'a person\u2019s answer');
+  decide(notebook, 'frequencyUnit', found?.how ?? 'a person\u2019s answer');
   return unit;
+}
+
+/** What may tell the unit of the frequencies. */
+export interface FrequencyEvidence {
+  readonly headerText: string;
+  readonly values: readonly number[];
+  readonly preamble: Preamble;
+  readonly range: StatedRange | null;
+  readonly rows: RowsShown & { readonly count: number };
+}
+
+/** The unit in header or preamble; where start and stop contradict it, a person decides. */
+function unitByWords(notebook: Notebook, { headerText, values, preamble, range, rows }: FrequencyEvidence, show: (unit: FrequencyUnit) => string): Found<FrequencyUnit> | null {
+  const inHeader = frequencyUnitOf(headerText) ?? frequencyUnitIn(headerText);
+  const key = entryOf(preamble, 'frequencyUnit');
+  const byKey = key === null ? null : frequencyUnitIn(key.value);
+  const stated: Found<FrequencyUnit>[] = [];
+  if (inHeader !== null) stated.push({ unit: inHeader, how: 'the column\u2019s header' });
+  if (byKey !== null && key !== null) stated.push({ unit: byKey, how: `line ${key.line + 1}` });
+  if (stated.length === 0) return null;
+  const byRange = unitByRange(values, range, rows.count - 1);
+  const contradiction = byRange !== null && stated.every((one) => one.unit !== byRange.unit) ? [byRange] : [];
+  return askConflict(notebook, { id: 'frequency-unit', lines: rows.lines, show }, [...stated, ...contradiction]);
+}
+
+function unitBySize(highest: number): Found<FrequencyUnit> | null {
+  return highest >= surelyHertz ? { unit: 'Hz', how: 'the values are so large that they can only be hertz' } : null;
 }
 
 const titleLines = 6;
@@ -85,15 +108,24 @@ function levelUnitBeside(preamble: Preamble): Found<DeclaredLevelUnit> | null {
 }
 
 function levelUnitByPreamble(preamble: Preamble): Found<DeclaredLevelUnit> | null {
+  return levelUnitByKey(preamble) ?? levelUnitBeside(preamble) ?? levelUnitByProse(preamble) ?? levelUnitByReference(preamble);
+}
+
+function levelUnitByKey(preamble: Preamble): Found<DeclaredLevelUnit> | null {
   const key = entryOf(preamble, 'levelUnit');
-  const byKey = key === null ? null : levelUnitIn(key.value);
-  if (byKey !== null) return { unit: byKey, how: `line ${(key?.line ?? 0) + 1}` };
-  const beside = levelUnitBeside(preamble);
-  if (beside !== null) return beside;
-  if (preamble.lines.some(({ text }) => /\blog(?:arithmic)? ?mag(?:nitude)?\b/i.test(text))) return { unit: 'dB', how: 'the comments call the values log magnitude' };
+  const unit = key === null ? null : levelUnitIn(key.value);
+  return key === null || unit === null ? null : { unit, how: `line ${key.line + 1}` };
+}
+
+function levelUnitByProse(preamble: Preamble): Found<DeclaredLevelUnit> | null {
+  const isLogMagnitude = preamble.lines.some(({ text }) => /\blog(?:arithmic)? ?mag(?:nitude)?\b/i.test(text));
+  return isLogMagnitude ? { unit: 'dB', how: 'the comments call the values log magnitude' } : null;
+}
+
+function levelUnitByReference(preamble: Preamble): Found<DeclaredLevelUnit> | null {
   const reference = entryOf(preamble, 'referenceLevel');
-  const byReference = reference === null ? null : levelValue(reference.value, reference.keyText)?.unit ?? null;
-  return byReference === null || byReference === 'dB' ? null : { unit: byReference, how: `the reference level of line ${(reference?.line ?? 0) + 1}` };
+  const unit = reference === null ? null : (levelValue(reference.value, reference.keyText)?.unit ?? null);
+  return reference === null || unit === null || unit === 'dB' ? null : { unit, how: `the reference level of line ${reference.line + 1}` };
 }
 
 const choices = ['dBm', 'dB\u00b5V', 'dB', 'dB\u00b5V/m', 'dBmV', 'V', 'mW'] as const;
@@ -115,15 +147,15 @@ export function decideLevelUnit(notebook: Notebook, { unitText, name, preamble, 
   const stated = levelUnitByPreamble(preamble);
   const found = own !== null ? { unit: own, how: 'the column\u2019s header or cells' } : stated;
   if (own !== null && stated !== null && stated.unit !== own && entryOf(preamble, 'levelUnit') !== null) {
-    return settle(notebook, askConflict(notebook, 'level-unit', [{ unit: own, how: 'the column\u2019s header or cells' }, stated], rows, show));
+    return settle(notebook, askConflict(notebook, { id: 'level-unit', lines: rows.lines, show }, [{ unit: own, how: 'the column\u2019s header or cells' }, stated]));
   }
   if (found === null) {
     const unit = ask(notebook, { id: 'level-unit', code: 'unit-missing', message: `The file does not tell the unit of "${name}".`, lines: rows.lines, choices: choices.map((id) => ({ id, label: id, sample: show(id) })) });
     return settle(notebook, { unit, how: 'a person\u2019s answer' });
   }
   if (markerContradicts(preamble, found.unit, levelAt)) {
-    doubt(notebook, 'unit-contradicted', 'doubt', `The declared unit ${found.unit} and the marker of the preamble are 107 dB apart.`);
-    return settle(notebook, askConflict(notebook, 'level-unit', [found, { unit: 'dB\u00b5V', how: 'the marker, 107 dB away' }], rows, show));
+    doubt(notebook, { code: 'unit-contradicted', weight: 'doubt', message: `The declared unit ${found.unit} and the marker of the preamble are 107 dB apart.` });
+    return settle(notebook, askConflict(notebook, { id: 'level-unit', lines: rows.lines, show }, [found, { unit: 'dB\u00b5V', how: 'the marker, 107 dB away' }]));
   }
   if (found.unit === 'dBm' && middle > 60) {
     const unit = ask(notebook, { id: 'level-unit', code: 'implausible-level', message: `"${name}" is declared in dBm, and its values lie around ${middle.toFixed(0)}: that is more power than any analyzer bears.`, lines: rows.lines, choices: [found.unit, 'dB\u00b5V' as const].map((id) => ({ id, label: id, sample: show(id) })) });

@@ -61,25 +61,31 @@ function byNulPattern(notebook: Notebook, bytes: Uint8Array): string | null {
   if (!bytes.includes(0)) return null;
   const { even, odd } = nulShares(bytes);
   if (Math.max(even, odd) > 0.7 && Math.min(even, odd) < 0.1) {
-    doubt(notebook, 'utf-16-without-mark', 'note', 'The file looks like UTF-16 without its mark and was read as such.');
+    doubt(notebook, { code: 'utf-16-without-mark', weight: 'note', message: 'The file looks like UTF-16 without its mark and was read as such.' });
     return utf16(notebook, bytes, odd > even ? 'utf-16le' : 'utf-16be', 'zero bytes at every other place');
   }
   const kept = bytes.filter((byte) => byte !== 0);
   const hasOthers = kept.some((byte) => byte < 32 && byte !== 9 && byte !== 10 && byte !== 13 && byte !== 26);
   if (hasOthers || kept.length < (1 - mostPadding) * bytes.length) throw refuse('not-text', 'The file holds bytes that are no text.');
-  doubt(notebook, 'padding-removed', 'note', `${bytes.length - kept.length} zero bytes between readable text were passed over.`);
+  doubt(notebook, { code: 'padding-removed', weight: 'note', message: `${bytes.length - kept.length} zero bytes between readable text were passed over.` });
   return decodePlain(notebook, kept);
 }
 
 /** Windows-1252 signs that stand in units and names: µ, °, ², ·, –, letters of Western languages. */
 const isWestern = (byte: number): boolean => byte >= 0xa0 || [0x80, 0x85, 0x91, 0x92, 0x93, 0x94, 0x96, 0x97, 0x99].includes(byte);
 
+/** Bytes that a UTF-8 character with this first byte has; 0 where none begins so. */
+function characterLength(lead: number): number {
+  if (lead < 0x80) return 1;
+  if (lead >= 0xc2 && lead < 0xe0) return 2;
+  if (lead >= 0xe0 && lead < 0xf0) return 3;
+  return lead >= 0xf0 && lead < 0xf5 ? 4 : 0;
+}
+
 function firstBadByte(bytes: Uint8Array): number {
   for (let at = 0; at < bytes.length;) {
-    const lead = bytes[at] ?? 0;
-    const length = lead < 0x80 ? 1 : lead >= 0xc2 && lead < 0xe0 ? 2 : lead >= 0xe0 && lead < 0xf0 ? 3 : lead >= 0xf0 && lead < 0xf5 ? 4 : 0;
-    if (length === 0) return at;
-    if (length > 1 && decodeStrictly(bytes.subarray(at, at + length), 'utf-8') === null) return at;
+    const length = characterLength(bytes[at] ?? 0);
+    if (length === 0 || (length > 1 && decodeStrictly(bytes.subarray(at, at + length), 'utf-8') === null)) return at;
     at += length;
   }
   return -1;
@@ -136,7 +142,7 @@ function decodePlain(notebook: Notebook, bytes: Uint8Array): string {
   if (holdsGoodUtf8(bytes) || bytes.some((byte) => byte >= 0x80 && !isWestern(byte))) throw refuse('bad-encoding', `Byte ${bad} (line ${line}) is no UTF-8.`, line);
   notebook.transcription.encoding = 'windows-1252';
   decide(notebook, 'encoding', 'not UTF-8; every byte fits Windows-1252');
-  doubt(notebook, 'not-utf-8', 'note', `The file is not UTF-8; it was read as Windows-1252 (line ${line}).`, line);
+  doubt(notebook, { code: 'not-utf-8', weight: 'note', message: `The file is not UTF-8; it was read as Windows-1252 (line ${line}).`, line: line });
   return new TextDecoder('windows-1252').decode(bytes);
 }
 

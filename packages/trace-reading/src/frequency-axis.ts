@@ -11,7 +11,7 @@ export function axisOfColumn(column: Float64Array, unit: FrequencyUnit): Float64
 }
 
 /** An axis that the file does not write out: from start, stop and number of points of the preamble, evenly or by decades. */
-export function axisOfRange(notebook: Notebook, range: StatedRange | null, preamble: Preamble, rowCount: number, line: number): Float64Array {
+export function axisOfRange(notebook: Notebook, range: StatedRange | null, preamble: Preamble, { rowCount, line }: { rowCount: number; line: number }): Float64Array {
   if (range === null || Number.isNaN(range.stopHz)) throw refuse('frequency-missing', 'The rows hold levels alone, and the preamble does not tell start and stop (or centre and span) of the sweep.', line);
   if (range.unit === null && range.stopHz < 1e6) throw refuse('frequency-missing', 'The rows hold levels alone, and start and stop in the preamble have no unit.', line);
   const isLog = /\blog/i.test(entryOf(preamble, 'axisScale')?.value ?? '') && range.startHz > 0;

@@ -23,15 +23,19 @@ const limitWord = /limit|grenz|mask|limite|threshold/;
 /** What a column's name says of it. */
 export type NamedRole = 'frequency' | 'level' | 'index' | 'time' | 'phase' | 'limit' | null;
 
+const isFrequencyName = (plain: string, name: string): boolean => frequencyWord.test(plain) || (frequencyUnitIn(name) !== null && levelUnitIn(name) === null);
+const isLevelName = (plain: string, name: string): boolean => levelWord.test(plain) || levelUnitIn(name) !== null || levelUnitOf(name) !== null;
+
+/** In the order in which they are tried: the first that fits is the role. */
+const roleTests: readonly (readonly [Exclude<NamedRole, null>, (plain: string, name: string) => boolean])[] = [
+  ['index', (plain, name) => name.trim() === '#' || indexWord.test(plain)], ['limit', (plain) => limitWord.test(plain)], ['frequency', isFrequencyName], ['time', (plain) => timeWord.test(plain)],
+  ['phase', (plain, name) => phaseWord.test(plain) || name.includes('\u00b0')], ['level', isLevelName],
+];
+
 /** What a name says a column is. */
 export function roleOfName(name: string): NamedRole {
   const plain = plainWords(name);
-  if (name.trim() === '#' || indexWord.test(plain)) return 'index';
-  if (limitWord.test(plain)) return 'limit';
-  if (frequencyWord.test(plain) || (frequencyUnitIn(name) !== null && levelUnitIn(name) === null)) return 'frequency';
-  if (timeWord.test(plain)) return 'time';
-  if (phaseWord.test(plain) || name.includes('\u00b0')) return 'phase';
-  return levelWord.test(plain) || levelUnitIn(name) !== null || levelUnitOf(name) !== null ? 'level' : null;
+  return roleTests.find(([, fits]) => fits(plain, name))?.[0] ?? null;
 }
 
 function cellsOf(text: string, { delimiter }: Separators): string[] {
@@ -41,15 +45,31 @@ function cellsOf(text: string, { delimiter }: Separators): string[] {
   return (/\t/.test(bare) ? bare.split('\t') : bare.split(/\s*[,;]\s*|\s{2,}/)).map((cell) => cell.trim());
 }
 
-const isUnitCell = (cell: string): boolean => frequencyUnitOf(cell.replace(/^[[(](.*)[\])]$/, '$1')) !== null || levelUnitOf(cell.replace(/^[[(](.*)[\])]$/, '$1')) !== null;
+const isUnitCell = (cell: string): boolean => frequencyUnitOf(bareUnit(cell)) !== null || levelUnitOf(bareUnit(cell)) !== null;
+
+/** Whether a line of two cells is a key with its value rather than two names. */
+function isKeyWithValue(cells: readonly string[], roles: readonly NamedRole[]): boolean {
+  return cells.length === 2 && preambleKeyOf(cells[0] ?? '') !== null && roles[0] !== 'frequency' && roles[0] !== 'index';
+}
+
+function namesColumns(roles: readonly NamedRole[], width: number): boolean {
+  if (width === 1) return roles[0] === 'level';
+  const has = (...wanted: readonly NamedRole[]): boolean => roles.some((role) => role !== null && wanted.includes(role));
+  return has('frequency', 'index', 'time') || roles.filter((role) => role === 'level').length >= width - 1;
+}
 
 function isHeader(cells: readonly string[], width: number, { decimalMark }: Separators): boolean {
   if (cells.length < Math.max(1, width - 1) || cells.length > width + 1) return false;
-  if (cells.some((cell) => readCell(cell, decimalMark).kind === 'number')) return false;
-  if (cells.some((cell) => /[:=]\s*\S/.test(cell))) return false;
+  if (cells.some((cell) => readCell(cell, decimalMark).kind === 'number' || /[:=]\s*\S/.test(cell))) return false;
   const roles = cells.map(roleOfName);
-  const isKeyed = cells.length === 2 && preambleKeyOf(cells[0] ?? '') !== null && roles[0] !== 'frequency' && roles[0] !== 'index';
-  return !isKeyed && roles.some((role) => role !== null) && (width > 1 ? roles.includes('frequency') || roles.includes('index') || roles.includes('time') || roles.filter((role) => role === 'level').length >= width - 1 : roles[0] === 'level');
+  return !isKeyWithValue(cells, roles) && namesColumns(roles, width);
+}
+
+const bareUnit = (cell: string): string => cell.replace(/^[[(](.*)[\])]$/, '$1');
+
+/** Whether a line holds nothing but units. */
+function isUnitLine(cells: readonly string[], width: number): boolean {
+  return cells.length >= Math.max(1, width - 1) && cells.length <= width && cells.some(isUnitCell) && cells.every((cell) => cell === '' || isUnitCell(cell) || /^(?:-|#|1|deg|\u00b0|rad|s)$/.test(cell));
 }
 
 const linesAbove = 8;
@@ -64,8 +84,8 @@ export function findHeader(lines: TextLines, block: DataBlock, separators: Separ
     if (text.trim() === '') continue;
     seen += 1;
     const cells = cellsOf(text, separators);
-    if (units.length === 0 && cells.length >= Math.max(1, width - 1) && cells.length <= width && cells.some(isUnitCell) && cells.every((cell) => cell === '' || isUnitCell(cell) || /^(?:-|#|1|deg|\u00b0|rad|s)$/.test(cell))) {
-      units = cells.map((cell) => cell.replace(/^[[(](.*)[\])]$/, '$1'));
+    if (units.length === 0 && isUnitLine(cells, width)) {
+      units = cells.map(bareUnit);
       continue;
     }
     if (isHeader(cells, width, separators)) return { line, names: cells, units };

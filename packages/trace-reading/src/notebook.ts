@@ -20,9 +20,9 @@ export function openNotebook(answers: readonly { questionId: string; choiceId: s
 }
 
 /** Writes down a doubt once. */
-export function doubt(notebook: Notebook, code: string, weight: Doubt['weight'], message: string, line?: number): void {
-  if (notebook.doubts.some((known) => known.code === code && known.message === message)) return;
-  notebook.doubts.push({ code, weight, message, ...(line === undefined ? {} : { line }) });
+export function doubt(notebook: Notebook, found: Doubt): void {
+  if (notebook.doubts.some((known) => known.code === found.code && known.message === found.message)) return;
+  notebook.doubts.push(found);
 }
 
 /** Writes down by what something was decided. */

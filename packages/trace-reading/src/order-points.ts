@@ -57,7 +57,7 @@ function withoutTwins(notebook: Notebook, points: LoosePoints): LoosePoints {
   if (twin < 0) return points;
   const isHarmless = points.frequencyHz.every((frequency, at) => at === 0 || frequency !== points.frequencyHz[at - 1] || points.level[at] === points.level[at - 1]);
   const line = valueAt(points.lines, twin) + 1;
-  if (isHarmless) doubt(notebook, 'same-point-twice', 'note', `A frequency stands twice with the same level, first in line ${line}; one of both was kept.`, line);
+  if (isHarmless) doubt(notebook, { code: 'same-point-twice', weight: 'note', message: `A frequency stands twice with the same level, first in line ${line}; one of both was kept.`, line: line });
   const how = isHarmless ? 'first' : ask(notebook, {
     id: 'same-frequency', code: 'duplicate-frequency', message: `Line ${line}: ${points.frequencyHz[twin]} Hz stands twice with different levels.`, lines: [line - 1, line],
     choices: (['first', 'highest', 'mean'] as const).map((id) => ({ id, label: { first: 'keep the first', highest: 'keep the highest', mean: 'keep the mean in dB' }[id], sample: sampleOf(mergeEqual(points, id), twin - 1) })),
@@ -70,9 +70,9 @@ export function orderPoints(notebook: Notebook, points: LoosePoints): LoosePoint
   const count = points.frequencyHz.length;
   const negative = points.frequencyHz.findIndex((frequency) => frequency < 0);
   if (negative >= 0) throw refuse('bad-frequency', `Line ${valueAt(points.lines, negative) + 1}: ${points.frequencyHz[negative]} Hz is no frequency.`, valueAt(points.lines, negative) + 1);
-  if (points.frequencyHz.includes(0)) doubt(notebook, 'zero-frequency', 'note', 'The sweep begins at 0 Hz; that point has no place on a logarithmic axis.');
+  if (points.frequencyHz.includes(0)) doubt(notebook, { code: 'zero-frequency', weight: 'note', message: 'The sweep begins at 0 Hz; that point has no place on a logarithmic axis.' });
   if (count > 1 && firstStall(points.frequencyHz) === 1 && firstStall(points.frequencyHz.slice().reverse()) < 0) {
-    doubt(notebook, 'falling-sweep', 'note', 'The frequencies fall; the sweep was turned round.');
+    doubt(notebook, { code: 'falling-sweep', weight: 'note', message: 'The frequencies fall; the sweep was turned round.' });
     return reversed(points);
   }
   const fall = points.frequencyHz.findIndex((frequency, at) => at > 0 && frequency < valueAt(points.frequencyHz, at - 1));

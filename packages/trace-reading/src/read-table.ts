@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { checkPointCount, checkRange } from './check-counts.js';
 import { chooseBlocks } from './choose-blocks.js';
 import { chooseSeparators } from './choose-separators.js';
@@ -17,6 +18,7 @@ import type { SweepSettings } from './sweep.js';
 import { settingsOf, traceModeIn } from './sweep-settings.js';
 import { sweepFromPoints } from './sweep-from-points.js';
 import type { TextLines } from './text-lines.js';
+import type { DeclaredLevelUnit } from './unit-words.js';
 import type { ReadSweep } from './transcription.js';
 
 /** Reads a table of rows: separators, blocks, columns, units, axis, sweeps. */
@@ -71,14 +73,20 @@ function rowsShown(block: DataBlock, frequencyColumn: number | null, levelColumn
   return { lines: rows.map((row) => (block.lines[row] ?? 0) + 1), frequency: of(frequencyColumn), level: of(levelColumn) };
 }
 
+/** Everything that may name the unit of a column: its cells, the line of units, its name. */
+function headerTextOf(block: DataBlock, header: Header | null, column: number): string {
+  const [glued = '', unit = '', name = ''] = [block.gluedUnits[column], header?.units[column], header?.names[column]];
+  if (unit !== '') return `${name} ${unit}`;
+  return glued !== '' ? glued : name;
+}
+
 function axisOf(notebook: Notebook, { block, preamble }: BlockToRead, frequencyColumn: number | null, header: Header | null): Float64Array {
   const range = statedRange(preamble);
   const column = frequencyColumn === null ? undefined : block.columns[frequencyColumn];
-  if (frequencyColumn === null || column === undefined) return axisOfRange(notebook, range, preamble, block.rowCount, block.firstLine + 1);
-  const headerText = [block.gluedUnits[frequencyColumn] ?? '', header?.units[frequencyColumn] ?? '', header?.names[frequencyColumn] ?? ''].find((text) => text !== '') ?? '';
-  const withUnit = header?.units[frequencyColumn] ? `${header.names[frequencyColumn] ?? ''} ${header.units[frequencyColumn]}` : headerText;
+  if (frequencyColumn === null || column === undefined) return axisOfRange(notebook, range, preamble, { rowCount: block.rowCount, line: block.firstLine + 1 });
   const finite = column.filter((value) => Number.isFinite(value));
-  const unit = decideFrequencyUnit(notebook, { headerText: withUnit, values: [finite[0] ?? NaN, finite.at(-1) ?? NaN], preamble, range, rows: { ...rowsShown(block, frequencyColumn, 0), count: block.rowCount } });
+  const values = [valueAt(finite, 0), valueAt(finite, finite.length - 1)];
+  const unit = decideFrequencyUnit(notebook, { headerText: headerTextOf(block, header, frequencyColumn), values, preamble, range, rows: { ...rowsShown(block, frequencyColumn, 0), count: block.rowCount } });
   return axisOfColumn(column, unit);
 }
 
@@ -95,22 +103,34 @@ function magnitude(real: Float64Array, imaginary: Float64Array): Float64Array {
   return real.map((value, row) => Math.hypot(value, imaginary[row] ?? NaN));
 }
 
-function readTrace(notebook: Notebook, { block, preamble, separators: _separators }: BlockToRead, { trace, place, frequencyHz, settings, impedanceOhm, count }: TraceToRead): ReadSweep {
-  const values = block.columns[trace.column] ?? new Float64Array();
-  const imaginary = trace.imaginaryColumn === undefined ? undefined : block.columns[trace.imaginaryColumn];
-  const isComplex = imaginary !== undefined || trace.isLinearRatio === true;
-  const level = imaginary === undefined ? values : magnitude(values, imaginary);
-  const finite = level.filter(Number.isFinite).sort();
-  const levelAt = (frequency: number): number => level[block.columns[0]?.indexOf(frequency) ?? -1] ?? NaN;
-  const unit = isComplex ? 'dB' : decideLevelUnit(notebook, { unitText: trace.unitText, name: trace.name, preamble, rows: rowsShown(block, null, trace.column), levelAt, middle: finite[finite.length >> 1] ?? NaN });
-  if (isComplex) {
+function valuesOf(block: DataBlock, { column, imaginaryColumn }: TraceColumn): Float64Array {
+  const values = block.columns[column] ?? new Float64Array();
+  const imaginary = imaginaryColumn === undefined ? undefined : block.columns[imaginaryColumn];
+  return imaginary === undefined ? values : magnitude(values, imaginary);
+}
+
+const voltageUnits: readonly string[] = ['V', 'mV', '\u00b5V', 'dB\u00b5V', 'dBmV', 'dBV'];
+
+function unitOfTrace(notebook: Notebook, { block, preamble }: BlockToRead, trace: TraceColumn, level: Float64Array): DeclaredLevelUnit {
+  if (trace.imaginaryColumn !== undefined || trace.isLinearRatio === true) {
     notebook.transcription.levelUnit ??= 'dB';
     decide(notebook, 'levelUnit', 'complex or linear values, shown as 20\u00b7log10 of their magnitude');
+    return 'dB';
   }
-  if (unit === 'V' || unit === 'mV' || unit === '\u00b5V' || unit === 'dB\u00b5V' || unit === 'dBmV' || unit === 'dBV') doubt(notebook, 'converted-at-impedance', 'note', `Levels in ${unit} were converted to dBm at ${impedanceOhm} \u03a9.`);
+  const finite = level.filter(Number.isFinite).sort();
+  const levelAt = (frequency: number): number => valueAt(level, block.columns[0]?.indexOf(frequency) ?? -1);
+  return decideLevelUnit(notebook, { unitText: trace.unitText, name: trace.name, preamble, rows: rowsShown(block, null, trace.column), levelAt, middle: valueAt(finite, finite.length >> 1) });
+}
+
+function readTrace(notebook: Notebook, toRead: BlockToRead, { trace, place, frequencyHz, settings, impedanceOhm, count }: TraceToRead): ReadSweep {
+  const { block, preamble } = toRead;
+  const level = valuesOf(block, trace);
+  const unit = unitOfTrace(notebook, toRead, trace, level);
+  if (voltageUnits.includes(unit)) doubt(notebook, { code: 'converted-at-impedance', weight: 'note', message: `Levels in ${unit} were converted to dBm at ${impedanceOhm} \u03a9.` });
   const own = ownSettings(preamble, trace, { place, count });
   const { text, iso } = measuredTime(preamble);
-  const sweep = sweepFromPoints(notebook, { name: trace.name, points: { frequencyHz, level, lines: block.lines }, unit, isLinearRatio: isComplex, impedanceOhm, settings: { ...settings, ...own } });
+  const isLinearRatio = trace.imaginaryColumn !== undefined || trace.isLinearRatio === true;
+  const sweep = sweepFromPoints(notebook, { name: trace.name, points: { frequencyHz, level, lines: block.lines }, unit, isLinearRatio, impedanceOhm, settings: { ...settings, ...own } });
   return { name: trace.name, sweep, ...(iso === undefined ? {} : { measuredAt: iso }), ...(text === undefined ? {} : { measuredAtText: text }) };
 }
 

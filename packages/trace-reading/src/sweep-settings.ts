@@ -1,6 +1,6 @@
 import { entryOf, type Preamble } from './preamble.js';
 import { frequencyValue, leadingNumber, levelValue, secondsValue } from './quantity.js';
-import { plainWords } from './setting-words.js';
+import { plainWords, type PreambleKey } from './setting-words.js';
 import type { SweepSettings } from './sweep.js';
 
 type Words<Value> = readonly (readonly [RegExp, Value])[];
@@ -37,25 +37,29 @@ function onOff(text: string | undefined): boolean | undefined {
 }
 
 function defined(settings: { [Key in keyof SweepSettings]: SweepSettings[Key] | undefined }): SweepSettings {
-  return Object.fromEntries(Object.entries(settings).filter(([, value]) => value !== undefined)) as SweepSettings;
+  return Object.fromEntries(Object.entries(settings).filter(([, value]) => value !== undefined));
 }
 
 /** The analyzer's settings, as far as the preamble tells them in words that are known. A bandwidth of 0 tells nothing. */
 export function settingsOf(preamble: Preamble): SweepSettings {
-  const text = (key: Parameters<typeof entryOf>[1]): string | undefined => entryOf(preamble, key)?.value.split('|')[0]?.trim();
-  const entry = (key: Parameters<typeof entryOf>[1]): { value: string; keyText: string } => entryOf(preamble, key) ?? { value: '', keyText: '' };
-  const hertz = (key: 'rbw' | 'vbw'): number | undefined => {
-    const found = frequencyValue(entry(key).value, entry(key).keyText);
-    return found !== null && found.hz > 0 ? found.hz : undefined;
-  };
-  const number = (key: Parameters<typeof entryOf>[1]): number | undefined => leadingNumber(entry(key).value)?.value;
-  const held = number('held');
-  const referenceLevel = levelValue(entry('referenceLevel').value, entry('referenceLevel').keyText);
-  const impedance = number('impedance');
+  const text = (key: PreambleKey): string | undefined => entryOf(preamble, key)?.value.split('|')[0]?.trim();
   return defined({
-    rbwHz: hertz('rbw'), vbwHz: hertz('vbw'), detector: wordOf(detectors, text('detector')), traceMode: wordOf(traceModes, text('traceMode')), averaging: wordOf(averagings, text('averaging')),
-    held: held !== undefined && held >= 1 && Number.isInteger(held) ? held : undefined, attenuationDb: number('attenuation'), preamplifier: onOff(text('preamplifier')),
-    referenceLevelDbm: referenceLevel?.unit === 'dBm' ? referenceLevel.value : undefined, sweepTimeS: secondsValue(entry('sweepTime').value, entry('sweepTime').keyText) ?? undefined,
-    impedanceOhm: impedance !== undefined && impedance > 0 ? impedance : undefined, correctionsApplied: onOff(text('corrections')), instrument: text('instrument')?.slice(0, 100), serial: text('serial')?.slice(0, 100),
+    ...numbersOf(preamble), detector: wordOf(detectors, text('detector')), traceMode: wordOf(traceModes, text('traceMode')), averaging: wordOf(averagings, text('averaging')),
+    preamplifier: onOff(text('preamplifier')), correctionsApplied: onOff(text('corrections')), instrument: text('instrument')?.slice(0, 100), serial: text('serial')?.slice(0, 100),
   });
+}
+
+type Found<Keys extends keyof SweepSettings> = { [Key in Keys]: SweepSettings[Key] | undefined };
+
+function numbersOf(preamble: Preamble): Found<'rbwHz' | 'vbwHz' | 'held' | 'attenuationDb' | 'referenceLevelDbm' | 'sweepTimeS' | 'impedanceOhm'> {
+  const entry = (key: PreambleKey): { value: string; keyText: string } => entryOf(preamble, key) ?? { value: '', keyText: '' };
+  const number = (key: PreambleKey): number | undefined => leadingNumber(entry(key).value)?.value;
+  const positive = (value: number | undefined): number | undefined => (value !== undefined && value > 0 ? value : undefined);
+  const hertz = (key: 'rbw' | 'vbw'): number | undefined => positive(frequencyValue(entry(key).value, entry(key).keyText)?.hz);
+  const held = positive(number('held'));
+  const referenceLevel = levelValue(entry('referenceLevel').value, entry('referenceLevel').keyText);
+  return {
+    rbwHz: hertz('rbw'), vbwHz: hertz('vbw'), held: Number.isInteger(held) ? held : undefined, attenuationDb: number('attenuation'), impedanceOhm: positive(number('impedance')),
+    referenceLevelDbm: referenceLevel?.unit === 'dBm' ? referenceLevel.value : undefined, sweepTimeS: secondsValue(entry('sweepTime').value, entry('sweepTime').keyText) ?? undefined,
+  };
 }

@@ -1,3 +1,4 @@
+import { valueAt } from '@leeside/units/value-at';
 import { decibelsFromFieldRatio } from '@leeside/units/decibels';
 import { frequencyHzFrom, type FrequencyUnit } from '@leeside/units/frequency-unit';
 import { decide, doubt, takeSettings, type Notebook } from './notebook.js';
@@ -20,22 +21,25 @@ interface Options {
 
 const keyword = /^\s*\[([^\]]+)\]\s*(.*)$/;
 
+const defaults: Options = { unit: 'GHz', parameter: 's', format: 'ma', impedanceOhm: 50 };
+
+/** What one word of the option line says; null where it says nothing that is known. */
+function optionOf(word: string): Partial<Options> | null {
+  const unit = frequencyUnitOf(word);
+  if (unit !== null) return { unit };
+  if (/^[syzgh]$/.test(word)) return { parameter: word };
+  return word === 'db' || word === 'ma' || word === 'ri' ? { format: word } : null;
+}
+
 function optionsOf(text: string): Options | null {
   if (!/^\s*#/.test(text)) return null;
-  const words = text.replace(/^\s*#/, '').replace(/!.*$/, '').trim().toLowerCase().split(/\s+/).filter((word) => word !== '');
-  let options: Options = { unit: 'GHz', parameter: 's', format: 'ma', impedanceOhm: 50 };
-  for (let at = 0; at < words.length; at += 1) {
-    const word = words[at] ?? '';
-    const unit = frequencyUnitOf(word);
-    if (unit !== null) options = { ...options, unit };
-    else if (/^[syzgh]$/.test(word)) options = { ...options, parameter: word };
-    else if (word === 'db' || word === 'ma' || word === 'ri') options = { ...options, format: word };
-    else if (word === 'r' && Number.isFinite(Number.parseFloat(words[at + 1] ?? ''))) {
-      options = { ...options, impedanceOhm: Number.parseFloat(words[at + 1] ?? '') };
-      at += 1;
-    } else return null;
-  }
-  return options;
+  const bare = text.replace(/^\s*#/, '').replace(/!.*$/, '').trim().toLowerCase();
+  const impedance = /(?:^|\s)r\s+(\d+(?:\.\d*)?)/.exec(bare);
+  const words = bare.replace(/(?:^|\s)r\s+\d+(?:\.\d*)?/, ' ').split(/\s+/).filter((word) => word !== '');
+  const found = words.map(optionOf);
+  if (found.includes(null)) return null;
+  const options = found.reduce<Options>((known, option) => ({ ...known, ...option }), defaults);
+  return impedance === null ? options : { ...options, impedanceOhm: Number(impedance[1]) };
 }
 
 const headLines = 300;
@@ -68,20 +72,23 @@ function numbersOf(text: string, line: number): number[] {
 }
 
 function readBody(lines: TextLines): Body {
-  let options: Options | null = null;
-  const keywords = new Map<string, string>();
-  const rows: { line: number; values: number[] }[] = [];
+  const body = { options: null as Options | null, keywords: new Map<string, string>(), rows: [] as { line: number; values: number[] }[] };
   for (let line = 0; line < lines.count; line += 1) {
     const text = lineAt(lines, line).replace(/!.*$/, '').trim();
     const key = keyword.exec(text);
-    if (key) {
-      const name = (key[1] ?? '').trim().toLowerCase();
-      if (name === 'end' || name === 'noise data') break;
-      keywords.set(name, (key[2] ?? '').trim());
-    } else if (text.startsWith('#')) options ??= optionsOf(text);
-    else if (text !== '' && !isReferenceList(keywords, rows)) rows.push({ line, values: numbersOf(text, line) });
+    if (key === null) readBodyLine(body, text, line);
+    else {
+      const [, name = '', value = ''] = key;
+      if (/^(?:end|noise data)$/i.test(name.trim())) break;
+      body.keywords.set(name.trim().toLowerCase(), value.trim());
+    }
   }
-  return { options: options ?? { unit: 'GHz', parameter: 's', format: 'ma', impedanceOhm: 50 }, keywords, rows };
+  return { ...body, options: body.options ?? defaults };
+}
+
+function readBodyLine(body: { options: Options | null; keywords: ReadonlyMap<string, string>; rows: { line: number; values: number[] }[] }, text: string, line: number): void {
+  if (text.startsWith('#')) body.options ??= optionsOf(text);
+  else if (text !== '' && !isReferenceList(body.keywords, body.rows)) body.rows.push({ line, values: numbersOf(text, line) });
 }
 
 /** Impedances of version 2 may stand on lines of their own before the network data. */
@@ -90,15 +97,12 @@ function isReferenceList(keywords: ReadonlyMap<string, string>, rows: readonly u
 }
 
 function portCount({ keywords, rows }: Body, fileName: string): number {
-  const stated = Number.parseInt(keywords.get('number of ports') ?? '', 10);
+  const stated = Number.parseInt(keywords.get('number of ports') ?? /\.s(\d+)p$/i.exec(fileName)?.[1] ?? '', 10);
   if (stated > 0) return stated;
-  const byName = Number(/\.s(\d+)p$/i.exec(fileName)?.[1] ?? 0);
-  if (byName > 0) return byName;
-  const width = rows[0]?.values.length ?? 0;
-  if (width === 3) return 1;
-  if (width === 9) return rows[1] !== undefined && rows[1].values.length === 8 ? 4 : 2;
-  if (width === 7) return 3;
-  throw refuse('needs-mapping', 'How many ports the file has is told neither by its ending nor by its rows.', (rows[0]?.line ?? 0) + 1);
+  const [width = 0, next = 0] = rows.slice(0, 2).map(({ values }) => values.length);
+  const byWidth = new Map([[3, 1], [7, 3], [9, next === 8 ? 4 : 2]]).get(width);
+  if (byWidth === undefined) throw refuse('needs-mapping', 'How many ports the file has is told neither by its ending nor by its rows.', valueAt(rows.map(({ line }) => line), 0) + 1);
+  return byWidth;
 }
 
 interface Point {
@@ -111,16 +115,22 @@ interface Point {
 function pointsOf({ rows }: Body, pairCount: number): { points: Point[]; noiseRows: number } {
   const points: Point[] = [];
   for (let at = 0; at < rows.length;) {
-    const first = rows[at];
-    const [frequency = NaN, ...pairs] = first?.values ?? [];
-    if (points.length > 0 && frequency <= (points.at(-1)?.frequency ?? 0)) return { points, noiseRows: rows.length - at };
-    let next = at + 1;
-    for (; pairs.length < 2 * pairCount && next < rows.length; next += 1) pairs.push(...(rows[next]?.values ?? []));
-    if (pairs.length !== 2 * pairCount) throw refuse('ragged-row', `Line ${(first?.line ?? 0) + 1}: ${pairs.length} values follow the frequency, expected ${2 * pairCount}.`, (first?.line ?? 0) + 1);
-    points.push({ frequency, line: first?.line ?? 0, pairs });
+    const { point, next } = pointAt(rows, at, pairCount);
+    const before = points.at(-1);
+    if (before !== undefined && point.frequency <= before.frequency) return { points, noiseRows: rows.length - at };
+    if (point.pairs.length !== 2 * pairCount) throw refuse('ragged-row', `Line ${point.line + 1}: ${point.pairs.length} values follow the frequency, expected ${2 * pairCount}.`, point.line + 1);
+    points.push(point);
     at = next;
   }
   return { points, noiseRows: 0 };
+}
+
+function pointAt(rows: Body['rows'], at: number, pairCount: number): { point: Point; next: number } {
+  const taken: number[] = [];
+  let next = at;
+  for (; taken.length < 1 + 2 * pairCount && next < rows.length; next += 1) taken.push(...(rows[next]?.values ?? []));
+  const [frequency = NaN, ...pairs] = taken;
+  return { point: { frequency, line: rows[at]?.line ?? 0, pairs }, next };
 }
 
 function levelDb(format: Format, one: number, other: number): number {
@@ -171,6 +181,6 @@ function describe(notebook: Notebook, { options, keywords }: Body, { ports, poin
   decide(notebook, 'layout', `Touchstone ${keywords.get('version') ?? '1.1'}, ${ports} port${ports === 1 ? '' : 's'}, ${options.format.toUpperCase()} pairs, by its option line`);
   decide(notebook, 'frequencyUnit', 'option line');
   decide(notebook, 'levelUnit', 'magnitude of the S parameter in dB');
-  if (noiseRows > 0) doubt(notebook, 'noise-section', 'note', `${noiseRows} rows of noise data after the network data were passed over.`);
-  if (ports === 1) doubt(notebook, 'reflection-only', 'doubt', 'The file holds a reflection; it tells nothing of attenuation.');
+  if (noiseRows > 0) doubt(notebook, { code: 'noise-section', weight: 'note', message: `${noiseRows} rows of noise data after the network data were passed over.` });
+  if (ports === 1) doubt(notebook, { code: 'reflection-only', weight: 'doubt', message: 'The file holds a reflection; it tells nothing of attenuation.' });
 }

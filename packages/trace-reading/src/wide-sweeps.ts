@@ -88,8 +88,8 @@ export function readWideSweeps(notebook: Notebook, lines: TextLines): ReadSweep[
   notebook.transcription.rowsSkipped = pieces.length - kept.flat().length;
   decide(notebook, 'layout', 'rows of bins: date, time, low, high, step, count, levels');
   decide(notebook, 'levelUnit', 'rows of bins hold levels in dB against an unstated reference');
-  doubt(notebook, 'relative-levels', 'doubt', 'The levels have no absolute unit: they pair only with levels of the same kind.');
-  if (sweeps.length > kept.length) doubt(notebook, 'sweeps-left-out', 'doubt', `The file holds ${sweeps.length} sweeps; the first ${kept.length} were read.`);
+  doubt(notebook, { code: 'relative-levels', weight: 'doubt', message: 'The levels have no absolute unit: they pair only with levels of the same kind.' });
+  if (sweeps.length > kept.length) doubt(notebook, { code: 'sweeps-left-out', weight: 'doubt', message: `The file holds ${sweeps.length} sweeps; the first ${kept.length} were read.` });
   return kept.map((sweep, at) => {
     const name = kept.length === 1 ? 'Sweep' : `Sweep ${at + 1}`;
     return { name, measuredAtText: sweep[0]?.stamp ?? '', sweep: sweepFromPoints(notebook, { name, points: pointsOf(sweep), unit: 'dB', impedanceOhm: 50, settings: {} }) };

@@ -16,14 +16,16 @@ function passportOf(tools: ApiTools): InstanceType<typeof Passport> {
   return passport;
 }
 
+const asError = (fault: unknown): Error => (fault instanceof Error ? fault : new Error('Authentication broke.'));
+
 function byCookie(tools: ApiTools, request: Request): Promise<Principal | null> {
   return new Promise((resolve, reject) => {
     const passport = passportOf(tools);
     const middleware: unknown = passport.authenticate('jwt', { session: false }, (fault: unknown, principal: Principal | false) => {
-      if (fault) reject(fault instanceof Error ? fault : new Error(String(fault)));
+      if (fault) reject(asError(fault));
       else resolve(principal === false ? null : principal);
     });
-    (middleware as (request: Request, response: unknown, next: (fault?: unknown) => void) => void)(request, {}, (fault) => (fault ? reject(fault instanceof Error ? fault : new Error(String(fault))) : resolve(null)));
+    (middleware as (request: Request, response: unknown, next: (fault?: unknown) => void) => void)(request, {}, (fault) => (fault ? reject(asError(fault)) : resolve(null)));
   });
 }
 

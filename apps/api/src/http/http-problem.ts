@@ -1,14 +1,23 @@
 /** A refusal in words: becomes an RFC 9457 answer. Anything else that is thrown is a fault of ours and answers 500. */
 export class HttpProblem extends Error {
-  constructor(
-    readonly status: number,
-    readonly slug: string,
-    readonly title: string,
-    detail: string,
-    readonly more: { readonly errors?: readonly { pointer: string; code: string; message: string }[]; readonly headers?: Readonly<Record<string, string>> } = {},
-  ) {
+  readonly status: number;
+  readonly slug: string;
+  readonly title: string;
+  readonly more: ProblemExtras;
+
+  constructor(...[status, slug, title, detail, more = {}]: [status: number, slug: string, title: string, detail: string, more?: ProblemExtras]) {
     super(detail);
+    this.status = status;
+    this.slug = slug;
+    this.title = title;
+    this.more = more;
   }
+}
+
+/** Places in the request that were wrong, and headers that go with the answer. */
+export interface ProblemExtras {
+  readonly errors?: readonly { pointer: string; code: string; message: string }[];
+  readonly headers?: Readonly<Record<string, string>>;
 }
 
 export const notFound = (what = 'There is nothing at this address.'): HttpProblem => new HttpProblem(404, 'not-found', 'Not found', what);

@@ -28,13 +28,20 @@ export type Handler<Definition extends Endpoint> = (call: Call<Definition>) => P
 
 const isSafe = (method: string): boolean => method === 'GET' || method === 'HEAD';
 
+/** An unsafe call needs the token of its session, or a program's right to write; a safe one the right to read. */
+function checkManner(principal: Principal, request: Request, secret: string): void {
+  if (principal.by.kind === 'cookie') {
+    if (!isSafe(request.method)) checkCsrf(request, principal.by.sessionId, secret);
+    return;
+  }
+  const wanted = isSafe(request.method) ? 'read' : 'write';
+  if (!principal.by.scopes.includes(wanted)) throw forbidden(`This API token may not ${wanted}.`);
+}
+
 function checkAccess(access: Endpoint['access'], principal: Principal | null, request: Request, secret: string): void {
   if (access === 'public') return;
   if (principal === null) throw notSignedIn();
-  if (!isSafe(request.method)) {
-    if (principal.by.kind === 'cookie') checkCsrf(request, principal.by.sessionId, secret);
-    else if (!principal.by.scopes.includes('write')) throw forbidden('This API token may only read.');
-  } else if (principal.by.kind === 'token' && !principal.by.scopes.includes('read')) throw forbidden('This API token may not read.');
+  checkManner(principal, request, secret);
   if (access === 'signed in') return;
   const wanted: readonly Permission[] = typeof access === 'string' ? [access] : access;
   if (!wanted.some((permission) => isAllowed(principal.roles, permission))) throw forbidden('Your roles do not allow this.');

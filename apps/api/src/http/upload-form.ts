@@ -48,7 +48,7 @@ function makeFieldMemory() {
       if (!parsed.success) throw new HttpProblem(400, 'invalid-field', 'A field is not as it should be', `${field}: "${value.slice(0, 100)}" cannot be taken.`, { errors: [{ pointer: `/${field}`, code: 'invalid', message: `"${value.slice(0, 100)}" cannot be taken.` }] });
       inForce.set(field, parsed.data);
     },
-    current: (): UploadFields => Object.fromEntries(inForce) as UploadFields,
+    current: (): UploadFields => Object.fromEntries(inForce),
   };
 }
 
@@ -151,7 +151,7 @@ export async function receiveFiles(request: Request, store: ObjectStore): Promis
     return files;
   } catch (fault) {
     const settled = await Promise.allSettled(collected.files);
-    await Promise.all(settled.map((one) => (one.status === 'fulfilled' ? store.discard(one.value.object) : undefined)));
+    await Promise.all(settled.flatMap((one) => (one.status === 'fulfilled' ? [store.discard(one.value.object)] : [])));
     throw faultOfForm(collected.fault ?? fault);
   }
 }
