@@ -3,7 +3,7 @@ import { drawEndLabels, type ValueLabel } from '../plot/draw-end-labels';
 import { lastValue } from '../plot/end-labels';
 import type { PlotColumns, PlotInstance, PlotOptions, PlotSeries } from '../plot/plot-instance';
 import type { AttenuationColumns } from './attenuation-data';
-import { drawChevrons, drawWash } from './draw-bounds';
+import { drawCeilingTicks, drawChevrons, drawWash } from './draw-bounds';
 import { drawUncertainty } from './draw-uncertainty';
 import { drawWall } from './draw-wall';
 import { requiredAt, type Segment } from './requirement-wall';
@@ -26,10 +26,7 @@ function attenuationSeries({ colours, joined }: AttenuationSettings): PlotSeries
   const unjoined = joined ? {} : { paths: noLine };
   return [
     {},
-    {
-      label: 'ceiling', stroke: colours.edge, width: 1, ...unjoined,
-      points: joined ? { show: false } : { show: true, size: 9, width: 1, fill: 'transparent', stroke: colours.edge },
-    },
+    { label: 'ceiling', stroke: colours.edge, width: 1, points: { show: false }, ...unjoined },
     { label: 'at least', stroke: colours.ink, width: 1.4, dash: [5, 4], points: { show: false }, ...unjoined },
     {
       label: 'attenuation', stroke: colours.ink, width: 2, ...unjoined,
@@ -53,17 +50,18 @@ export function attenuationLabels({ columns, segments, window, colours }: Attenu
 
 /** Options of the attenuation plot: scales, series, and what is drawn by hand under and over them. */
 export function attenuationOptions(settings: AttenuationSettings): PlotOptions {
-  const { columns, colours, segments } = settings;
+  const { columns, colours, segments, joined } = settings;
   return {
     ...baseOptions({ ...settings, unit: 'dB' }),
     series: attenuationSeries(settings),
     hooks: {
       drawAxes: [(plot: PlotInstance) => {
         drawWall(plot, segments, colours);
-        drawWash(plot, columns, colours);
+        drawWash(plot, columns, { colours, joined });
         drawUncertainty(plot, columns, colours);
       }],
       draw: [(plot: PlotInstance) => {
+        if (!joined) drawCeilingTicks(plot, columns, colours);
         drawChevrons(plot, columns, colours);
         drawEndLabels(plot, attenuationLabels(settings));
       }],

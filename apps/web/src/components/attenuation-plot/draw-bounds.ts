@@ -35,7 +35,7 @@ function washPiece(ctx: CanvasRenderingContext2D, from: Spot, to: Spot, leastPx:
 }
 
 /** A light wash from each bound up to the ceiling, or a little way up where the bound is the ceiling: the truth is up there. */
-export function drawWash(plot: PlotInstance, columns: AttenuationColumns, colours: PlotColours): void {
+export function drawWash(plot: PlotInstance, columns: AttenuationColumns, { colours, joined }: { colours: PlotColours; joined: boolean }): void {
   const spots = boundSpots(plot, columns);
   clipped(plot, (ctx, ratio) => {
     ctx.fillStyle = colours.slate;
@@ -44,9 +44,9 @@ export function drawWash(plot: PlotInstance, columns: AttenuationColumns, colour
     for (const height of washHeightsPx) {
       spots.forEach((spot, at) => {
         if (!spot) return;
-        const next = spots[at + 1];
+        const next = joined ? spots[at + 1] : null;
         if (next) washPiece(ctx, spot, next, height * ratio);
-        else if (!spots[at - 1]) washPiece(ctx, { ...spot, x: spot.x - half }, { ...spot, x: spot.x + half }, height * ratio);
+        else if (!joined || !spots[at - 1]) washPiece(ctx, { ...spot, x: spot.x - half }, { ...spot, x: spot.x + half }, height * ratio);
       });
     }
   });
@@ -67,6 +67,23 @@ export function drawChevrons(plot: PlotInstance, columns: AttenuationColumns, co
       ctx.lineTo(spot.x, spot.y - 2 * ratio - half);
       ctx.lineTo(spot.x + half, spot.y - 2 * ratio);
     }
+    ctx.stroke();
+  });
+}
+
+/** Where readings stand alone, so do their ceilings: a short stroke each. */
+export function drawCeilingTicks(plot: PlotInstance, { frequencyHz, ceilingDb }: AttenuationColumns, colours: PlotColours): void {
+  clipped(plot, (ctx, ratio) => {
+    ctx.strokeStyle = colours.edge;
+    ctx.lineWidth = 1.4 * ratio;
+    ctx.beginPath();
+    ceilingDb.forEach((db, at) => {
+      if (db === null) return;
+      const x = plot.valToPos(frequencyHz[at] ?? NaN, 'x', true);
+      const y = plot.valToPos(db, 'y', true);
+      ctx.moveTo(x - aloneHalfPx * ratio, y);
+      ctx.lineTo(x + aloneHalfPx * ratio, y);
+    });
     ctx.stroke();
   });
 }

@@ -38,6 +38,7 @@ function nameWall(plot: PlotInstance, ctx: CanvasRenderingContext2D, end: WallPo
   ctx.font = `600 ${String(12.5 * ratio)}px "Atkinson Hyperlegible Next", sans-serif`;
   ctx.fillStyle = colours.faded;
   ctx.textBaseline = 'middle';
+  ctx.textAlign = 'left';
   ctx.fillText('required', x + 7 * ratio, plot.valToPos(end.db, 'y', true) + 9 * ratio);
 }
 

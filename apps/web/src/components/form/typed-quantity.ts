@@ -17,8 +17,8 @@ export const typedFrequency = (name: string) =>
   required(read(parseFrequency, `${name} must be a frequency such as 433.92 MHz.`), `${name} is missing. Write for example 433.92 MHz.`);
 
 /** A level typed as "-31 dBm" or "−31,5"; the unit may be left out. */
-export const typedLevel = (name: string, unit: string) =>
-  required(read((text) => parseLevel(text, unit), `${name} must be a number in ${unit}.`), `${name} is missing. Write for example −31 ${unit}.`);
+export const typedLevel = (name: string, unit: string, example = '\u221231') =>
+  required(read((text) => parseLevel(text, unit), `${name} must be a number in ${unit}.`), `${name} is missing. Write for example ${example} ${unit}.`);
 
 /** The same, or nothing. */
 export const optionalLevel = (name: string, unit: string) =>

@@ -6,7 +6,7 @@ function Part({ name, children, strong = false }: { name: string; children: Reac
   return (
     <div className="min-w-24">
       <dt className="text-xs text-faded">{name}</dt>
-      <dd className={strong ? 'text-lg font-semibold' : ''}>{children}</dd>
+      <dd className={`leading-8 ${strong ? 'text-lg font-semibold' : ''}`}>{children}</dd>
     </div>
   );
 }

@@ -2,7 +2,7 @@ import { decisionRules } from '@leeside/contracts/requirements';
 import { z } from 'zod';
 import { optionalNumber, typedFrequency, typedLevel } from '../../components/form/typed-quantity';
 
-const attenuation = (name: string) => typedLevel(name, 'dB').refine((db) => db >= 0 && db <= 300, `${name} must lie from 0 to 300 dB.`);
+const attenuation = (name: string) => typedLevel(name, 'dB', '50').refine((db) => db >= 0 && db <= 300, `${name} must lie from 0 to 300 dB.`);
 
 const segmentSchema = z.object({
   from: typedFrequency('Lower frequency'), to: typedFrequency('Upper frequency'),

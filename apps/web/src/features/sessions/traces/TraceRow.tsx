@@ -26,7 +26,7 @@ function SetUp({ trace, disabled, onChange }: PartProps) {
 
 function TraceFacts({ trace, showsName }: { trace: Trace; showsName: boolean }) {
   return (
-    <div className="min-w-0">
+    <div className="min-w-0 desk:row-span-2">
       <Link to={`/files/${trace.fileId}`} className={`font-semibold wrap-anywhere ${trace.setAside ? 'line-through' : ''}`}>{trace.fileName}</Link>
       {showsName && <span className="ms-2 text-sm text-faded">{trace.name}</span>}
       <p className="text-xs text-faded">
@@ -37,8 +37,9 @@ function TraceFacts({ trace, showsName }: { trace: Trace; showsName: boolean }) 
   );
 }
 
-const hasSetUp = ({ polarisation, position, chainLossDb, transmitLevelDbm }: Trace): boolean =>
-  [polarisation, position].some((text) => text !== '') || [chainLossDb, transmitLevelDbm].some((level) => level !== null);
+const setUpInWords = ({ polarisation, position, chainLossDb, transmitLevelDbm }: Trace): string =>
+  [polarisation, position, chainLossDb !== null && `chain ${levelText(chainLossDb)}\u2009dB`, transmitLevelDbm !== null && `sent ${levelText(transmitLevelDbm)}\u2009dBm`]
+    .filter(Boolean).join(', ') || 'not stated';
 
 function Acts({ trace, mayEdit, onChange }: { trace: Trace; mayEdit: boolean; onChange: (change: TraceChange) => void }) {
   const [asking, setAsking] = useState(false);
@@ -55,7 +56,7 @@ function Acts({ trace, mayEdit, onChange }: { trace: Trace; mayEdit: boolean; on
 
 /** One trace: what was measured, and what it is, edited where it stands. */
 export function TraceRow({ trace, mayEdit, showsName }: { trace: Trace; mayEdit: boolean; showsName: boolean }) {
-  const [open, setOpen] = useState(() => hasSetUp(trace));
+  const [open, setOpen] = useState(false);
   const change = useChangeTrace();
   const onChange = (body: TraceChange): void => change.mutate({ params: { id: trace.id }, body });
   const isEnclosed = trace.role === 'enclosed';
@@ -69,7 +70,7 @@ export function TraceRow({ trace, mayEdit, showsName }: { trace: Trace; mayEdit:
         {isEnclosed && <InlineText label="Condition" value={trace.condition} disabled={part.disabled} onSave={(condition) => onChange({ condition })} />}
         <div className={`flex flex-wrap items-center gap-x-3 ${isEnclosed ? 'desk:col-span-3 desk:col-start-2' : 'desk:col-span-2 desk:self-start desk:pt-5'}`}>
           {trace.setAside !== undefined && <span className="flex items-center gap-2 text-sm text-faded"><StateMark state="set aside" />{trace.setAside}</span>}
-          <Button kind="quiet" className="-ms-1.5 text-xs" aria-expanded={open} onClick={() => setOpen(!open)}>{open ? 'Less of its set-up' : 'Its set-up'}</Button>
+          <Button kind="quiet" className="-ms-1.5 text-xs" aria-expanded={open} onClick={() => setOpen(!open)}>{open ? 'Close the set-up' : `Set-up: ${setUpInWords(trace)}`}</Button>
           <Acts trace={trace} mayEdit={mayEdit} onChange={onChange} />
           <span role="status" className="text-xs text-faded">{change.isPending ? 'saving …' : change.isSuccess && 'saved'}</span>
         </div>
