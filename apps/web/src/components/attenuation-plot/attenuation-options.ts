@@ -6,7 +6,7 @@ import type { AttenuationColumns } from './attenuation-data';
 import { drawCeilingTicks, drawChevrons, drawWash } from './draw-bounds';
 import { drawUncertainty } from './draw-uncertainty';
 import { drawWall } from './draw-wall';
-import { requiredAt, type Segment } from './requirement-wall';
+import { nameOfWall, type Segment } from './requirement-wall';
 
 export interface AttenuationSettings extends Omit<BaseSettings, 'unit'> {
   columns: AttenuationColumns;
@@ -39,11 +39,11 @@ function attenuationSeries({ colours, joined }: AttenuationSettings): PlotSeries
 export function attenuationLabels({ columns, segments, window, colours }: AttenuationSettings): ValueLabel[] {
   const { frequencyHz, exactDb, ownBoundDb, ceilingDb } = columns;
   const shown = ownBoundDb.map((bound, at) => bound ?? exactDb[at] ?? null);
-  const required = segments.map((segment) => requiredAt(segment, window.toHz)).findLast((db) => db !== null) ?? null;
+  const wall = nameOfWall(segments, window);
   const labels: [string, string, number | null][] = [
     ['attenuation', colours.ink, lastValue(frequencyHz, shown, window.toHz)],
     ['ceiling', colours.faded, lastValue(frequencyHz, ceilingDb, window.toHz)],
-    ['required', colours.faded, required],
+    ['required', colours.faded, wall?.at === 'edge' ? wall.db : null],
   ];
   return labels.flatMap(([text, colour, value]) => (value === null ? [] : [{ text, colour, value }]));
 }

@@ -1,7 +1,7 @@
 import { clipped, pixelRatio } from '../plot/clipped';
 import type { PlotColours } from '../plot/plot-colours';
 import type { PlotInstance } from '../plot/plot-instance';
-import { wallTop, type Segment, type WallPoint } from './requirement-wall';
+import { nameOfWall, wallTop, type Segment, type WallPoint } from './requirement-wall';
 
 const hatchStepPx = 8;
 
@@ -33,13 +33,11 @@ function hatch(plot: PlotInstance, ctx: CanvasRenderingContext2D, stepPx: number
 /** A wall that ends inside the plot is named at its own end. */
 function nameWall(plot: PlotInstance, ctx: CanvasRenderingContext2D, end: WallPoint, colours: PlotColours): void {
   const ratio = pixelRatio(plot);
-  const x = plot.valToPos(end.hz, 'x', true);
-  if (x > plot.bbox.left + plot.bbox.width - 2 * ratio) return;
   ctx.font = `600 ${String(12.5 * ratio)}px "Atkinson Hyperlegible Next", sans-serif`;
   ctx.fillStyle = colours.faded;
   ctx.textBaseline = 'middle';
   ctx.textAlign = 'left';
-  ctx.fillText('required', x + 7 * ratio, plot.valToPos(end.db, 'y', true) + 9 * ratio);
+  ctx.fillText('required', plot.valToPos(end.hz, 'x', true) + 7 * ratio, plot.valToPos(end.db, 'y', true) + 9 * ratio);
 }
 
 /** The requirement: a hatched wall rising from below, over which the curve must stay. */
@@ -60,8 +58,8 @@ export function drawWall(plot: PlotInstance, segments: readonly Segment[], colou
       ctx.strokeStyle = colours.faded;
       ctx.lineWidth = 2 * ratio;
       ctx.stroke(wallPath(plot, top, false));
-      const end = top.at(-1);
-      if (end && segment === segments.at(-1)) nameWall(plot, ctx, end, colours);
     }
+    const name = nameOfWall(segments, { fromHz: min, toHz: max });
+    if (name?.at === 'own end') nameWall(plot, ctx, name, colours);
   });
 }

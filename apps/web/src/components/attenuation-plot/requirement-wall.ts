@@ -22,3 +22,14 @@ export function wallTop(segment: Segment, window: { fromHz: number; toHz: number
     return { hz, db: requiredAt(segment, hz) ?? segment.toDb };
   });
 }
+
+const edgeShare = 0.1;
+
+/** Where the name of the last segment stands: at the right edge of the window, or at its own end where that lies well inside; null where it is out of sight. */
+export function nameOfWall(segments: readonly Segment[], window: { fromHz: number; toHz: number }): { at: 'edge' | 'own end'; db: number; hz: number } | null {
+  const last = segments.findLast((segment) => segment.fromHz < window.toHz && segment.toHz > window.fromHz);
+  if (!last) return null;
+  const hz = Math.min(last.toHz, window.toHz);
+  const edgeHz = window.toHz / (window.toHz / window.fromHz) ** edgeShare;
+  return { at: hz >= edgeHz ? 'edge' : 'own end', hz, db: requiredAt(last, hz) ?? last.toDb };
+}

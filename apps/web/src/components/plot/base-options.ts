@@ -20,7 +20,7 @@ const face = '12px "Atkinson Hyperlegible Mono", monospace';
 const narrowPx = 560;
 
 /** Room right of the plotting area for the names of the series. */
-export const endLabelRoomPx = (width: number): number => (width < narrowPx ? 70 : 92);
+export const endLabelRoomPx = (width: number): number => (width < narrowPx ? 82 : 92);
 
 /** Numbers on the level axis: the topmost carries the unit. */
 export const decibelTexts = (ticks: readonly number[], unit: string, locale: string): string[] =>
