@@ -12,9 +12,9 @@ const suite = (name: string, include: string[], extra: Record<string, unknown> =
 export default defineConfig({
   test: {
     projects: [
-      suite('unit', ['packages/*/src/**/*.test.ts', 'apps/*/src/**/*.test.ts', 'sample-data/**/*.test.ts']),
+      suite('unit', ['packages/*/src/**/*.test.ts', 'apps/*/src/**/*.test.ts', 'sample-data/**/*.test.ts'], { testTimeout: 60_000 }),
       suite('web', ['apps/web/src/**/*.test.tsx'], { environment: 'jsdom' }),
-      suite('outside-checks', ['tests/outside-checks/**/*.test.ts'], { testTimeout: 60_000 }),
+      suite('outside-checks', ['tests/outside-checks/**/*.test.ts'], { testTimeout: 120_000 }),
       suite('system', ['tests/{api,journeys,faults,repository}/**/*.test.ts'], {
         fileParallelism: false, testTimeout: 120_000, hookTimeout: 120_000,
       }),

@@ -46,6 +46,15 @@ function preampDoubts(noise: MeasuredSweep, measured: MeasuredSweep): Doubt[] {
   return [{ code: 'noise-input-differs', weight: 'doubt', message: 'Input attenuation or preamplifier of the noise sweep differ from the reading’s: its floor may not be the reading’s.' }];
 }
 
+const known = new WeakMap<Float32Array, NoiseFloor>();
+
+/** The floor of a noise sweep, worked out once for all the readings of a session that share it. */
+function floorOfNoise({ sweep }: MeasuredSweep): NoiseFloor | null {
+  const floor = known.get(sweep.level) ?? noiseFloorOf(sweep.frequencyHz, sweep.level);
+  if (floor !== null) known.set(sweep.level, floor);
+  return floor;
+}
+
 /**
  * The floor of a reading, the best source first: a noise sweep that fits; the reading itself beside its carriers; none.
  * @param measured the sweep whose floor is sought.
@@ -54,7 +63,7 @@ function preampDoubts(noise: MeasuredSweep, measured: MeasuredSweep): Doubt[] {
  */
 export function findFloor(measured: MeasuredSweep, noises: readonly MeasuredSweep[], ownFloor: NoiseFloor | null): FoundFloor {
   const noise = pairNoise(measured, noises);
-  const floor = noise === null ? null : noiseFloorOf(noise.sweep.frequencyHz, noise.sweep.level);
+  const floor = noise === null ? null : floorOfNoise(noise);
   if (noise === null || floor === null) return { source: ownFloor === null ? 'none' : 'beside the carriers', floor: ownFloor, noiseTraceId: null, doubts: [] };
   const byBandwidth = moveByBandwidth(floor, noise, measured);
   const byHolding = moveByHolding(byBandwidth.floor, noise, measured);

@@ -32,9 +32,9 @@ function residualsOf(level: Float32Array, median: Float32Array): Float32Array {
 }
 
 /** Replaces what stands far above the running median by the median itself, until nothing does. */
-function withoutStraySignals(level: Float32Array): { clean: Float32Array; median: Float32Array } {
+function withoutStraySignals(level: Float32Array, windowBins: number): { clean: Float32Array; median: Float32Array } {
   const clean = Float32Array.from(level);
-  let median = runningQuantile(clean, floorWindowBins, 0.5);
+  let median = runningQuantile(clean, windowBins, 0.5);
   for (let round = 0; round < 5; round += 1) {
     const residuals = residualsOf(clean, median);
     const mad = quantileOf(residuals.map(Math.abs).sort(), 0.5) * scaledMad;
@@ -46,7 +46,7 @@ function withoutStraySignals(level: Float32Array): { clean: Float32Array; median
       clipped += 1;
     }
     if (clipped === 0) break;
-    median = runningQuantile(clean, floorWindowBins, 0.5);
+    median = runningQuantile(clean, windowBins, 0.5);
   }
   return { clean, median };
 }
@@ -56,11 +56,12 @@ function withoutStraySignals(level: Float32Array): { clean: Float32Array; median
  * to the scatter about the median, equations (1) to (3).
  * @param frequencyHz bins of the noise, ascending.
  * @param level levels there, dBm or dB.
+ * @param windowBins width of the running median.
  * @returns the floor, or null where there are no bins.
  */
-export function noiseFloorOf(frequencyHz: Float64Array, level: Float32Array): NoiseFloor | null {
+export function noiseFloorOf(frequencyHz: Float64Array, level: Float32Array, windowBins = floorWindowBins): NoiseFloor | null {
   if (level.length === 0) return null;
-  const { clean, median } = withoutStraySignals(level);
+  const { clean, median } = withoutStraySignals(level, windowBins);
   const residuals = residualsOf(clean, median);
   const sorted = Float32Array.from(residuals).sort();
   const spreadDb = quantileOf(sorted, 0.75) - quantileOf(sorted, 0.25);

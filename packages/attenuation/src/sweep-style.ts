@@ -1,7 +1,8 @@
 import { valueAt } from '@leeside/units/value-at';
 import type { Sweep } from '@leeside/trace-reading/sweep';
 import { carrierOverThresholdDb, findCarriers, floorBesideCarriers } from './carriers.js';
-import { floorAt, noiseFloorOf, type NoiseFloor } from './noise-floor.js';
+import { medianStepHz } from './axis-search.js';
+import { floorAt, floorWindowBins, noiseFloorOf, type NoiseFloor } from './noise-floor.js';
 
 /** How a reference was swept, with its carriers and the floor that was used to tell. */
 export interface SweepStyle {
@@ -11,6 +12,15 @@ export interface SweepStyle {
   /** Floor of the sweep itself beside its carriers; null for a continuous one. */
   readonly ownFloor: NoiseFloor | null;
 }
+
+/** A window in which a carrier is a small part, however many bins its RBW covers. */
+function roughWindowBins(sweep: Sweep): number {
+  const stepHz = medianStepHz(sweep.frequencyHz);
+  const binsOfRbw = stepHz > 0 ? (sweep.settings.rbwHz ?? 0) / stepHz : 0;
+  return Math.max(floorWindowBins, Math.ceil(windowRbws * binsOfRbw));
+}
+
+const windowRbws = 20;
 
 function isSignalThroughout(sweep: Sweep, noise: NoiseFloor, marginDb: number): boolean {
   let strong = 0;
@@ -31,7 +41,7 @@ function isSignalThroughout(sweep: Sweep, noise: NoiseFloor, marginDb: number): 
 export function sweepStyle(sweep: Sweep, noise: NoiseFloor | null, marginDb = 6): SweepStyle {
   const continuous: SweepStyle = { style: 'continuous', carrierHz: [], ownFloor: null };
   if (noise !== null && isSignalThroughout(sweep, noise, marginDb)) return continuous;
-  const rough = noise ?? noiseFloorOf(sweep.frequencyHz, sweep.level);
+  const rough = noise ?? noiseFloorOf(sweep.frequencyHz, sweep.level, roughWindowBins(sweep));
   if (rough === null) return continuous;
   const frequencyOf = (bin: number): number => valueAt(sweep.frequencyHz, bin);
   const first = findCarriers(sweep, rough, marginDb).map(frequencyOf);
