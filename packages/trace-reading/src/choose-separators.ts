@@ -70,11 +70,11 @@ const perhapsThousands = /^[+\-\u2212]?\d{1,3},\d{3}$/;
 
 /** A comma that may mark decimals or thousands, where no value of the file decides. */
 function askThousands(notebook: Notebook, lines: TextLines, sample: readonly number[], separators: Separators): Separators {
-  if (separators.decimalMark !== ',') return separators;
+  if (separators.delimiter === ',') return separators;
   const rows = sample.filter((line) => readRow(lineAt(lines, line), separators) !== null);
   const withComma = rows.flatMap((line) => splitCells(lineAt(lines, line), separators.delimiter)).map((cell) => cell.trim()).filter((cell) => cell.includes(','));
   if (withComma.length === 0 || withComma.some((cell) => !perhapsThousands.test(cell))) {
-    decide(notebook, 'decimalMark', withComma.length === 0 ? 'no number has decimals' : 'commas stand where only a decimal mark can');
+    decide(notebook, 'decimalMark', withComma.length === 0 ? 'no number has a comma' : `commas stand where only ${separators.decimalMark === ',' ? 'a decimal mark' : 'thousands'} can`);
     return separators;
   }
   const shown = rows.slice(0, 3);
@@ -83,5 +83,5 @@ function askThousands(notebook: Notebook, lines: TextLines, sample: readonly num
     id: 'decimal-mark', code: 'ambiguous-decimal', message: 'A comma before three digits may mark decimals or thousands, and no value of the file decides.', lines: shown.map((line) => line + 1),
     choices: [{ id: 'decimal', label: 'decimal comma', sample: sampleWith((text) => text.replaceAll(',', '.')) }, { id: 'thousands', label: 'thousands', sample: sampleWith((text) => text.replaceAll(',', '')) }],
   });
-  return choice === 'decimal' ? separators : { ...separators, decimalMark: '.' };
+  return { ...separators, decimalMark: choice === 'decimal' ? ',' : '.' };
 }

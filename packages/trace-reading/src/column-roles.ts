@@ -61,6 +61,11 @@ function byContent(notebook: Notebook, block: DataBlock, columns: readonly Colum
     decide(notebook, 'frequencyColumn', `column ${rising[0].place + 1}: the only one whose values rise steadily`);
     return rising[0];
   }
+  const [first, ...others] = rising;
+  if (first?.place === 0 && first.facts.isAscending && others.every(({ facts }) => facts.isDescending)) {
+    decide(notebook, 'frequencyColumn', 'column 1: its values rise, those of the others fall');
+    return first;
+  }
   if (rising.length > 1) return askColumn(notebook, block, rising);
   return null;
 }

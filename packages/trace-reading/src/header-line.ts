@@ -47,9 +47,11 @@ function cellsOf(text: string, { delimiter }: Separators): string[] {
 
 const isUnitCell = (cell: string): boolean => frequencyUnitOf(bareUnit(cell)) !== null || levelUnitOf(bareUnit(cell)) !== null;
 
-/** Whether a line of two cells is a key with its value rather than two names. */
+/** Whether a line of two cells is a key with its value rather than two names; only "Time" and "Point" may also name a column. */
 function isKeyWithValue(cells: readonly string[], roles: readonly NamedRole[]): boolean {
-  return cells.length === 2 && preambleKeyOf(cells[0] ?? '') !== null && roles[0] !== 'frequency' && roles[0] !== 'index';
+  const key = cells.length === 2 ? preambleKeyOf(cells[0] ?? '') : null;
+  const mayNameColumn = (key === 'time' || key === 'points') && roles[1] === 'level';
+  return key !== null && !mayNameColumn;
 }
 
 function namesColumns(roles: readonly NamedRole[], width: number): boolean {
@@ -59,8 +61,8 @@ function namesColumns(roles: readonly NamedRole[], width: number): boolean {
 }
 
 function isHeader(cells: readonly string[], width: number, { decimalMark }: Separators): boolean {
-  if (cells.length < Math.max(1, width - 1) || cells.length > width + 1) return false;
-  if (cells.some((cell) => readCell(cell, decimalMark).kind === 'number' || /[:=]\s*\S/.test(cell))) return false;
+  if (cells.length < Math.max(Math.min(2, width), width - 1) || cells.length > width + 1) return false;
+  if (cells.some((cell) => ['number', 'no value'].includes(readCell(cell, decimalMark).kind) || /[:=]\s*\S/.test(cell))) return false;
   const roles = cells.map(roleOfName);
   return !isKeyWithValue(cells, roles) && namesColumns(roles, width);
 }
