@@ -49,25 +49,27 @@ export function reachesRange(facts: ColumnFacts, rowCount: number, range: Stated
   });
 }
 
+function mayBeFrequency({ facts, role }: Column, rowCount: number): boolean {
+  return role === null && facts.lowest >= 0 && (facts.isAscending || facts.isDescending || (facts.risingShare > 0.95 && rowCount > 20));
+}
+
+/** The column that its numbers alone show to be the frequency, with the words why; null where none or several may be. */
+function shownByNumbers(columns: readonly Column[], rowCount: number, range: StatedRange | null): { column: Column; how: string } | null {
+  const reaching = range === null ? [] : columns.filter(({ facts }) => reachesRange(facts, rowCount, range));
+  if (reaching.length === 1 && reaching[0]) return { column: reaching[0], how: 'its values reach start and stop of the preamble' };
+  const [first, ...others] = columns;
+  if (first === undefined) return null;
+  if (others.length === 0) return { column: first, how: 'the only one whose values rise steadily' };
+  const isFirstAlone = first.place === 0 && first.facts.isAscending && others.every(({ facts }) => facts.isDescending);
+  return isFirstAlone ? { column: first, how: 'its values rise, those of the others fall' } : null;
+}
+
 function byContent(notebook: Notebook, block: DataBlock, columns: readonly Column[], range: StatedRange | null): Column | null {
-  const mayBe = columns.filter(({ facts, role }) => role === null && facts.lowest >= 0 && (facts.isAscending || facts.isDescending || (facts.risingShare > 0.95 && block.rowCount > 20)));
-  const reaching = range === null ? [] : mayBe.filter(({ facts }) => reachesRange(facts, block.rowCount, range));
-  if (reaching.length === 1 && reaching[0]) {
-    decide(notebook, 'frequencyColumn', `column ${reaching[0].place + 1}: its values reach start and stop of the preamble`);
-    return reaching[0];
-  }
-  const rising = mayBe.filter(({ facts }) => !facts.isIndex || block.rowCount < 3);
-  if (rising.length === 1 && rising[0]) {
-    decide(notebook, 'frequencyColumn', `column ${rising[0].place + 1}: the only one whose values rise steadily`);
-    return rising[0];
-  }
-  const [first, ...others] = rising;
-  if (first?.place === 0 && first.facts.isAscending && others.every(({ facts }) => facts.isDescending)) {
-    decide(notebook, 'frequencyColumn', 'column 1: its values rise, those of the others fall');
-    return first;
-  }
-  if (rising.length > 1) return askColumn(notebook, block, rising);
-  return null;
+  const mayBe = columns.filter((column) => mayBeFrequency(column, block.rowCount) && (!column.facts.isIndex || block.rowCount < 3 || range !== null));
+  const shown = shownByNumbers(mayBe, block.rowCount, range);
+  if (shown !== null) decide(notebook, 'frequencyColumn', `column ${shown.column.place + 1}: ${shown.how}`);
+  if (shown !== null || mayBe.length === 0) return shown === null ? null : shown.column;
+  return askColumn(notebook, block, mayBe);
 }
 
 function askColumn(notebook: Notebook, block: DataBlock, columns: readonly Column[]): Column {

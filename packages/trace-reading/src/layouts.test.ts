@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { layoutSamples, type LayoutSample } from '../../../sample-data/layouts/layout-samples.js';
 import { readTraceBytes } from './read-trace-file.js';
+import type { TraceReading } from './transcription.js';
 
 function utf16(text: string, isBigEndian: boolean): Uint8Array {
   const bytes = new Uint8Array(text.length * 2);
@@ -17,6 +18,18 @@ function bytesOf({ text, encoding = 'utf-8' }: LayoutSample): Uint8Array {
     case 'utf-16le': return utf16(text, false);
     case 'windows-1252': return Uint8Array.from(text, (sign) => sign.charCodeAt(0));
   }
+}
+
+/** Answers whatever is asked with its first choice until the file is read. */
+function readingAfterAnswers(sample: LayoutSample, answers: readonly { questionId: string; choiceId: string }[]): TraceReading {
+  const reading = readTraceBytes(bytesOf(sample), { fileName: sample.fileName, answers });
+  if (reading.kind !== 'question' || answers.length > 4) return reading;
+  const [question] = reading.questions;
+  const [choice] = question?.choices ?? [];
+  if (question === undefined || choice === undefined) throw new Error('A question without a choice.');
+  expect(question.lines.length).toBeGreaterThan(0);
+  for (const { sample: shown } of question.choices) expect(shown).not.toBe('');
+  return readingAfterAnswers(sample, [...answers, { questionId: question.id, choiceId: choice.id }]);
 }
 
 describe('layouts, each read as it is meant', () => {
@@ -37,16 +50,6 @@ describe('layouts, each read as it is meant', () => {
 
   const questions = layoutSamples.filter(({ expected }) => 'question' in expected);
   test.each(questions.map((sample) => [sample.name, sample] as const))('every choice of "%s" leads to a reading', (_name, sample) => {
-    const answersSoFar: { questionId: string; choiceId: string }[] = [];
-    for (let round = 0; round < 4; round += 1) {
-      const reading = readTraceBytes(bytesOf(sample), { fileName: sample.fileName, answers: answersSoFar });
-      if (reading.kind === 'read') return;
-      if (reading.kind === 'refused') throw new Error(reading.problem.message);
-      const [question] = reading.questions;
-      expect(question?.lines.length).toBeGreaterThan(0);
-      for (const { sample: shown } of question?.choices ?? []) expect(shown).not.toBe('');
-      answersSoFar.push({ questionId: question?.id ?? '', choiceId: question?.choices[0]?.id ?? '' });
-    }
-    throw new Error('Four answers were not enough.');
+    expect(readingAfterAnswers(sample, []).kind).toBe('read');
   });
 });
