@@ -5,7 +5,7 @@ export interface LayoutSample {
   readonly text: string;
   readonly encoding?: 'utf-8' | 'utf-16le with mark' | 'utf-16le' | 'utf-16be with mark' | 'windows-1252';
   /** First sweep: frequencies in Hz and levels in its kept unit; null where a question is right. */
-  readonly expected: { readonly unit: 'dBm' | 'dB' | 'dB\u00b5V/m'; readonly frequencyHz: readonly number[]; readonly level: readonly number[]; readonly sweeps?: number } | { readonly question: string };
+  readonly expected: { readonly unit: 'dBm' | 'dB' | 'dB\u00b5V/m'; readonly frequencyHz: readonly number[]; readonly level: readonly number[]; readonly sweeps?: number } | { readonly question: string } | { readonly refusal: string; readonly line?: number };
 }
 
 const nul = '\u0000';
@@ -94,6 +94,17 @@ export const layoutSamples: readonly LayoutSample[] = [
   { name: 'Touchstone 2, parameters by row, pairs of real and imaginary part', fileName: 'ac.ts', text: '[Version] 2.0\n# GHz S RI R 50\n[Number of Ports] 2\n[Two-Port Data Order] 12_21\n[Number of Frequencies] 2\n[Network Data]\n1 0 0 0.01 0 0.1 0 0 0\n2 0 0 0.02 0 0.2 0 0 0\n[End]\n', expected: { unit: 'dB', sweeps: 2, frequencyHz: [1e9, 2e9], level: [-20, -13.979400086720375] } },
   { name: 'Touchstone without any ending, options out of order', fileName: 'ad.txt', text: '! a pad\n# r 50 ma s mhz\n100 0.1 0 0.5 10 0.5 10 0.1 0 ! first\n200 0.1 0 0.25 10 0.25 10 0.1 0\n', expected: { unit: 'dB', sweeps: 2, frequencyHz: [1e8, 2e8], level: [-6.020599913279624, -12.041199826559248] } },
   { name: 'a block prefix of the instrument bus', fileName: 'ae.csv', text: '#250Frequency [MHz],Level [dBm]\n100,-40.5\n200,-41.25\n', expected: { unit: 'dBm', frequencyHz: [1e8, 2e8], level: [-40.5, -41.25] } },
+  {
+    name: 'row numbers without a name, the axis from start and stop', fileName: 'al.csv', text: 'Start,100 MHz\nStop,104 MHz\nPoints,5\nUnit,dBm\n0,-40.5\n1,-41\n2,-42.5\n3,-41.25\n4,-40\n',
+    expected: { unit: 'dBm', frequencyHz: [100e6, 101e6, 102e6, 103e6, 104e6], level: [-40.5, -41, -42.5, -41.25, -40] },
+  },
+  { name: 'levels over time', fileName: 'am.csv', text: 'Center,100 MHz\nSpan,0 Hz\nTime [s],Level [dBm]\n0.0,-40.5\n0.1,-41\n0.2,-42.5\n', expected: { refusal: 'zero-span' } },
+  { name: 'a row with a value missing', fileName: 'an.csv', text: 'Frequency [MHz],Level [dBm]\n100,-40.5\n200\n300,-42\n', expected: { refusal: 'ragged-row', line: 3 } },
+  { name: 'a word among the numbers', fileName: 'ao.csv', text: 'Frequency [MHz],Level [dBm]\n100,-40.5\n200,0x10\n300,-42\n', expected: { refusal: 'bad-number', line: 3 } },
+  { name: 'a number out of range', fileName: 'ap.csv', text: 'Frequency [MHz],Level [dBm]\n100,-40.5\n200,1e400\n300,-42\n', expected: { refusal: 'number-out-of-range', line: 3 } },
+  { name: 'a header and nothing below', fileName: 'aq.csv', text: 'Frequency [MHz],Level [dBm]\n', expected: { refusal: 'no-data' } },
+  { name: 'blanks alone', fileName: 'ar.csv', text: ' \n\t\n', expected: { refusal: 'empty-file' } },
+  { name: 'a negative frequency', fileName: 'as.csv', text: 'Frequency [MHz],Level [dBm]\n-1,-40.5\n0,-41\n1,-42\n', expected: { refusal: 'bad-frequency', line: 2 } },
   { name: 'no unit of the level anywhere', fileName: 'af.csv', text: 'Frequency [MHz],Trace 1\n100,-40.5\n200,-41.25\n', expected: { question: 'level-unit' } },
   { name: 'a comma before three digits throughout', fileName: 'ag.csv', text: 'Frequency [MHz];Level [dBm]\n1,000;-40,500\n2,000;-41,250\n', expected: { question: 'decimal-mark' } },
   { name: 'another number of points than stated', fileName: 'ah.csv', text: 'Number of Points,4\nFrequency [MHz],Level [dBm]\n100,-40.5\n200,-41.25\n300,-42\n', expected: { question: 'point-count' } },

@@ -65,7 +65,7 @@ function shownByNumbers(columns: readonly Column[], rowCount: number, range: Sta
 }
 
 function byContent(notebook: Notebook, block: DataBlock, columns: readonly Column[], range: StatedRange | null): Column | null {
-  const mayBe = columns.filter((column) => mayBeFrequency(column, block.rowCount) && (!column.facts.isIndex || block.rowCount < 3 || range !== null));
+  const mayBe = columns.filter((column) => mayBeFrequency(column, block.rowCount) && (!column.facts.isIndex || (range !== null && reachesRange(column.facts, block.rowCount, range))));
   const shown = shownByNumbers(mayBe, block.rowCount, range);
   if (shown !== null) decide(notebook, 'frequencyColumn', `column ${shown.column.place + 1}: ${shown.how}`);
   if (shown !== null || mayBe.length === 0) return shown === null ? null : shown.column;
@@ -143,7 +143,7 @@ function uniqueNames(notebook: Notebook, traces: readonly TraceColumn[]): TraceC
 export function decideColumns(notebook: Notebook, block: DataBlock, header: Header | null, range: StatedRange | null): ColumnRoles {
   const columns = columnsOf(block, header);
   const frequency = frequencyOf(notebook, block, columns, range);
-  const others = columns.filter((column) => column !== frequency && !(column.facts.isIndex && column.role === null && columns.length > 2) && column.role !== 'index');
+  const others = columns.filter((column) => column !== frequency && !(column.facts.isIndex && column.role === null && columns.length > 1) && column.role !== 'index');
   const traces = tracesOf(notebook, others.filter((column) => column.role !== 'frequency'));
   if (traces.length === 0) throw refuse('no-data', 'No column holds levels.', block.firstLine + 1);
   decide(notebook, 'levelColumns', traces.map((trace) => `column ${trace.column + 1} "${trace.name}"`).join(', '));
