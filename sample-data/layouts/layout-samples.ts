@@ -84,6 +84,7 @@ export const layoutSamples: readonly LayoutSample[] = [
   },
   { name: 'a complex transmission', fileName: 't.csv', text: 'Freq(Hz),S21(REAL),S21(IMAG)\n1000000000,0.6,0.8\n1100000000,0.06,0.08\n', expected: { unit: 'dB', frequencyHz: [1e9, 1.1e9], level: [0, -20] } },
   { name: 'a table on its side', fileName: 'u.csv', text: 'Frequency [MHz],10,20,30,40\nLevel [dBm],-50,-51.5,-52,-53\n', expected: { unit: 'dBm', frequencyHz: [10e6, 20e6, 30e6, 40e6], level: [-50, -51.5, -52, -53] } },
+  { name: 'quoted cells', fileName: 'at.csv', text: '"Frequency, MHz","Level (dBm)"\n"100","-40.5"\n"200","-41.25"\n', expected: { unit: 'dBm', frequencyHz: [1e8, 2e8], level: [-40.5, -41.25] } },
   { name: 'a falling sweep', fileName: 'v.csv', text: 'Frequency [MHz],Level [dBm]\n30,-52\n20,-51\n10,-50\n', expected: { unit: 'dBm', frequencyHz: [10e6, 20e6, 30e6], level: [-50, -51, -52] } },
   { name: 'CR alone ends lines, bars part columns', fileName: 'w.txt', text: 'Frequency [kHz]|Level [dBm]\r100|-50\r200|-51\r300|-52.25\r', expected: { unit: 'dBm', frequencyHz: [1e5, 2e5, 3e5], level: [-50, -51, -52.25] } },
   { name: 'blanks part columns', fileName: 'x.txt', text: '  Frequency(MHz)   Amplitude(dBm)\n   100.0   -50.5\n   200.0   -51.25\n   300.0   -52\n', expected: { unit: 'dBm', frequencyHz: [1e8, 2e8, 3e8], level: [-50.5, -51.25, -52] } },

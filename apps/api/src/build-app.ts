@@ -20,7 +20,7 @@ import { requestIdOf, tellRequestId } from './http/request-id.js';
 import { securityHeaders } from './http/security-headers.js';
 import { servePage } from './http/serve-page.js';
 
-export const version = '0.1.0';
+const version = '0.1.0';
 
 /** Every call of the contract on one router. */
 export function apiRouter(tools: ApiTools): Router {

@@ -2,7 +2,7 @@ import { scanEnd, scanNumber } from './scan-number.js';
 import { frequencyUnitOf, levelUnitOf } from './unit-words.js';
 
 /** What a cell holds. A value that the analyzer marked as none is a gap, never a zero. */
-export type CellKind = 'number' | 'empty' | 'no value' | 'text';
+type CellKind = 'number' | 'empty' | 'no value' | 'text';
 export interface Cell {
   readonly kind: CellKind;
   readonly value: number;

@@ -40,7 +40,7 @@ function columnsOf(block: DataBlock, header: Header | null): Column[] {
 }
 
 /** Whether a column begins and ends where the preamble says, within two steps. */
-export function reachesRange(facts: ColumnFacts, rowCount: number, range: StatedRange): boolean {
+function reachesRange(facts: ColumnFacts, rowCount: number, range: StatedRange): boolean {
   const factors = range.unit === null ? [1, 1e3, 1e6, 1e9] : [1, 1e3, 1e6, 1e9];
   return factors.some((factor) => {
     const [low, high] = [Math.min(facts.first, facts.last) * factor, Math.max(facts.first, facts.last) * factor];

@@ -1,3 +1,4 @@
+import Papa from 'papaparse';
 import { readCell, type Cell } from './cell-value.js';
 
 export type Delimiter = '\t' | ';' | ',' | '|' | ' ';
@@ -15,19 +16,9 @@ export const separatorChoices: readonly Separators[] = [
 /** Names of separators as they are shown. */
 export const delimiterNames: Readonly<Record<Delimiter, string>> = { '\t': 'tab', ';': 'semicolon', ',': 'comma', '|': 'bar', ' ': 'blanks' };
 
+/** A line with quoted cells, as people's spreadsheets write them. */
 function splitQuoted(line: string, delimiter: string): string[] {
-  const cells: string[] = [];
-  let cell = '';
-  let isQuoted = false;
-  for (const sign of line) {
-    if (sign === '"') isQuoted = !isQuoted;
-    if (sign === delimiter && !isQuoted) {
-      cells.push(cell);
-      cell = '';
-    } else cell += sign;
-  }
-  cells.push(cell);
-  return cells;
+  return Papa.parse<string[]>(line, { delimiter, skipEmptyLines: false }).data[0] ?? [];
 }
 
 /** The cells of a line. Blanks part as one; a separator at the end makes no cell of its own. */

@@ -25,11 +25,6 @@ export function traceModeIn(text: string): SweepSettings['traceMode'] {
   return wordOf(traceModes, text.replace(/[()[\]]/g, ' '));
 }
 
-/** Detector that a word tells. */
-export function detectorIn(text: string): SweepSettings['detector'] {
-  return wordOf(detectors, text);
-}
-
 function onOff(text: string | undefined): boolean | undefined {
   const plain = plainWords(text ?? '');
   if (/^(?:on|ein|an|yes|1|true|marche|oui|actif)\b/.test(plain)) return true;

@@ -5,7 +5,7 @@ import { HttpProblem, notFound } from './http-problem.js';
 import { requestIdOf } from './request-id.js';
 
 /** Sends a refusal as problem+json. */
-export function sendProblem(request: Request, response: Response, problem: HttpProblem): void {
+function sendProblem(request: Request, response: Response, problem: HttpProblem): void {
   response.status(problem.status).set(problem.more.headers ?? {}).type('application/problem+json').send(JSON.stringify({
     type: `/problems/${problem.slug}`, title: problem.title, status: problem.status, detail: problem.message, instance: request.originalUrl.split('?')[0],
     requestId: requestIdOf(request), ...(problem.more.errors === undefined ? {} : { errors: problem.more.errors }),

@@ -10,7 +10,7 @@ const words: readonly (readonly [MeasuringRole, readonly string[]])[] = [
 ];
 
 /** The words of a file name: split at anything that is no letter, and where small letters meet capitals or digits. */
-export function wordsOfName(fileName: string): string[] {
+function wordsOfName(fileName: string): string[] {
   return fileName.replace(/\.[^.]*$/, '').normalize('NFKD').replace(/\p{M}/gu, '').replace(/(\p{Ll})(\p{Lu})/gu, '$1 $2').toLowerCase().split(/[^\p{L}]+/u).filter((word) => word !== '');
 }
 
