@@ -1,4 +1,5 @@
 import { valueAt } from '@leeside/units/value-at';
+import { selectRank } from './select-rank.js';
 
 const mostPoints = 2001;
 const fewestPoints = 5;
@@ -28,7 +29,7 @@ export function theilSenSlope(x: readonly number[], y: readonly number[]): numbe
     }
   }
   if (count === 0) return null;
-  const sorted = slopes.subarray(0, count).sort();
-  const middle = count >> 1;
-  return count % 2 === 1 ? (sorted[middle] ?? null) : (valueAt(sorted, middle - 1) + valueAt(sorted, middle)) / 2;
+  const known = slopes.subarray(0, count);
+  const upper = selectRank(known, count >> 1);
+  return count % 2 === 1 ? upper : (selectRank(known, (count >> 1) - 1) + upper) / 2;
 }
