@@ -1,7 +1,8 @@
 import type { DataBlock } from './data-blocks.js';
 import { findHeader } from './header-line.js';
 import { doubt, type Notebook } from './notebook.js';
-import type { Separators } from './separators.js';
+import { refuse } from './reading-fault.js';
+import { readRow, separatorChoices, type Separators } from './separators.js';
 import { lineAt, type TextLines } from './text-lines.js';
 
 const otherTable = /limit|marker|marke[rn]?\b|peak (?:list|table)|grenz|mask|correction|korrektur|transducer|loss table/i;
@@ -33,8 +34,16 @@ export function chooseBlocks(notebook: Notebook, lines: TextLines, blocks: reado
     notebook.transcription.rowsSkipped += block.rowCount;
     doubt(notebook, { code: 'other-table', weight: 'note', message: `Lines ${block.firstLine + 1} to ${block.lastLine + 1} are another table and were passed over.`, line: block.firstLine + 1 });
   }
+  refuseOtherSeparators(lines, main.block);
   noteTail(notebook, lines, blocks.at(-1));
   return chosen;
+}
+
+/** Rows of the same width that follow at once, separated in another way: the file changes its manner in the middle. */
+function refuseOtherSeparators(lines: TextLines, { lastLine, columns }: DataBlock): void {
+  const text = lineAt(lines, lastLine + 1);
+  if (columns.length < 2 || text.trim() === '') return;
+  if (separatorChoices.some((separators) => readRow(text, separators)?.length === columns.length)) throw refuse('mixed-delimiters', `Line ${lastLine + 2} is separated in another way than the lines before it.`, lastLine + 2);
 }
 
 const knownEnd = /^\W*(?:END|BEGIN|EOF|\[End\]|Trace (?:Name|Type|Data))\b/i;

@@ -41,12 +41,25 @@ export function chooseSeparators(notebook: Notebook, lines: TextLines): Separato
   const scores = separatorChoices.map((separators) => scoreOf(lines, sample, separators));
   const best = scores.reduce(better);
   if (best.rows === 0) return null;
+  if (isOneDecimalColumn(lines, sample, best)) {
+    notebook.transcription.decimalMark = ',';
+    decide(notebook, 'delimiter', 'one value a line');
+    decide(notebook, 'decimalMark', 'every line is one signed number with a comma');
+    return { delimiter: ';', decimalMark: ',' };
+  }
   refuseSharedComma(notebook, lines, sample, best);
   const chosen = askThousands(notebook, lines, sample, best.separators);
   notebook.transcription.delimiter = best.columns === 1 ? null : delimiterNames[chosen.delimiter];
   notebook.transcription.decimalMark = chosen.decimalMark;
   decide(notebook, 'delimiter', best.columns === 1 ? 'one value a line' : `${best.rows} of ${sample.length} lines looked at are rows of ${best.columns} columns this way`);
   return chosen;
+}
+
+/** Whether what seem to be two columns of whole numbers is one of levels with decimal comma: what stands first is negative, and what stands second never signed. */
+function isOneDecimalColumn(lines: TextLines, sample: readonly number[], { separators, columns }: Score): boolean {
+  if (separators.delimiter !== ',' || columns !== 2) return false;
+  const rows = sample.map((line) => lineAt(lines, line).trim()).filter((text) => readRow(text, separators)?.length === 2);
+  return rows.every((text) => /^[+\-\u2212]?\d+,\d+$/.test(text)) && rows.some((text) => /^[-\u2212]/.test(text));
 }
 
 /** A comma that may both part columns and mark decimals: whole numbers alone in an even number of columns, with names for half of them. */

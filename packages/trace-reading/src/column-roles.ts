@@ -82,7 +82,7 @@ function askColumn(notebook: Notebook, block: DataBlock, columns: readonly Colum
 }
 
 function frequencyOf(notebook: Notebook, block: DataBlock, columns: readonly Column[], range: StatedRange | null): Column | null {
-  const named = columns.filter(({ role, facts }) => role === 'frequency' && !facts.isEmpty);
+  const named = columns.filter(({ role, facts }) => role === 'frequency' && !facts.isEmpty && !(facts.isConstant && block.rowCount > 1));
   if (named[0]) {
     decide(notebook, 'frequencyColumn', `column ${named[0].place + 1}: its name "${named[0].name || named[0].unitText}"`);
     return named[0];

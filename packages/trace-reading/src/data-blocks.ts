@@ -1,6 +1,6 @@
 import { valueAt } from '@leeside/units/value-at';
 import { readCell, type Cell } from './cell-value.js';
-import { refuse } from './reading-fault.js';
+import { refuse, type Refusal } from './reading-fault.js';
 import { readingLimits } from './reading-limits.js';
 import { readRow, splitCells, type Separators } from './separators.js';
 import { lineAt, type TextLines } from './text-lines.js';
@@ -17,6 +17,7 @@ export interface DataBlock {
   readonly gluedUnits: readonly string[];
   readonly rowCount: number;
   readonly noValueCount: number;
+  readonly strayUnits: readonly StrayUnit[];
 }
 
 function pastBlanks(text: string, from: number, end: number): number {
@@ -103,12 +104,41 @@ function explainLine(text: string, line: number, separators: Separators, width: 
   if (cells.length === 1 && /\d/.test(text)) throw refuse('mixed-delimiters', `Line ${line + 1} is separated in another way than the lines before it.`, line + 1);
 }
 
+/** A unit that stands in a cell although the first row has none there. */
+export interface StrayUnit {
+  readonly unit: string;
+  readonly line: number;
+  readonly column: number;
+}
+
+/** Units glued to cells whose column has none in its first row; one that differs from the first row's is refused. */
+function strayUnitsOf(row: readonly Cell[], first: readonly Cell[], line: number): StrayUnit[] {
+  return row.flatMap(({ kind, unit }, column) => {
+    const usual = first[column]?.unit ?? '';
+    if (kind !== 'number' || unit === '' || unit.toLowerCase() === usual.toLowerCase()) return [];
+    if (usual !== '') throw strayUnitRefusal({ unit, line, column });
+    return [{ unit, line, column }];
+  });
+}
+
+/** What is said of a unit that is not its column's. */
+export function strayUnitRefusal({ unit, line, column }: StrayUnit): Refusal {
+  return refuse('unit-conflict', `Line ${line + 1}, column ${column + 1}: the unit "${unit}" is not that of the column.`, line + 1, column + 1);
+}
+
+/** A row whose last cells are empty, brought to its width: the separators at its end stand for them. */
+function paddedRow(row: Cell[] | null, text: string, { delimiter }: Separators, width: number): Cell[] | null {
+  if (row === null || row.length >= width || !text.trimEnd().endsWith(delimiter.trimEnd() || '\u0000')) return row;
+  return [...row, ...Array.from({ length: width - row.length }, (): Cell => ({ kind: 'empty', value: NaN, unit: '' }))];
+}
+
 /** The block that begins at a line; null where that line is no row. */
 function blockAt(lines: TextLines, firstLine: number, separators: Separators): DataBlock | null {
   const first = readRow(lineAt(lines, firstLine), separators);
   if (first === null) return null;
   if (first.length > readingLimits.columns) throw refuse('too-many-columns', `Line ${firstLine + 1} has ${first.length} columns; the limit is ${readingLimits.columns}.`, firstLine + 1);
   const growing = new GrowingColumns(first.length);
+  const strayUnits: StrayUnit[] = [];
   const plain = new Float64Array(first.length);
   let line = firstLine;
   let lastLine = firstLine;
@@ -117,12 +147,13 @@ function blockAt(lines: TextLines, firstLine: number, separators: Separators): D
     else {
       const text = lineAt(lines, line);
       if (isBlank(text)) continue;
-      const row = readRow(text, separators);
+      const row = paddedRow(readRow(text, separators), text, separators, first.length);
       if (row?.length !== first.length) {
         explainBreak(lines, line, separators, first.length);
         break;
       }
       rejectOutOfRange(row, line);
+      strayUnits.push(...strayUnitsOf(row, first, line));
       growing.noValueCount += row.filter((cell) => cell.kind !== 'number').length;
       growing.add(line, (column) => valueOf(row, column));
     }
@@ -130,7 +161,7 @@ function blockAt(lines: TextLines, firstLine: number, separators: Separators): D
   }
   return {
     firstLine, lastLine, lines: growing.lines.subarray(0, growing.count), columns: growing.columns.map((column) => column.subarray(0, growing.count)), gluedUnits: first.map((cell) => cell.unit),
-    rowCount: growing.count, noValueCount: growing.noValueCount,
+    rowCount: growing.count, noValueCount: growing.noValueCount, strayUnits,
   };
 }
 

@@ -140,14 +140,29 @@ function markerContradicts(preamble: Preamble, unit: DeclaredLevelUnit, levelAt:
   return unit === 'dBm' && Math.abs(offset - apartDb) < 1;
 }
 
+function isContradicted(own: DeclaredLevelUnit, stated: Found<DeclaredLevelUnit> | null, preamble: Preamble): boolean {
+  return stated !== null && stated.unit !== own && entryOf(preamble, 'levelUnit') !== null;
+}
+
+function isImplausible(middle: number, levels: readonly number[]): boolean {
+  return middle > mostPlausibleDbm || isTinyAndPositive(levels);
+}
+
+const mostPlausibleDbm = 60;
+
+/** Values between 0 and 1 throughout are powers or voltages rather than decibels. */
+function isTinyAndPositive(levels: readonly number[]): boolean {
+  return levels.length > 2 && levels.every((level) => level > 0 && level < 0.01);
+}
+
 /** The unit of a trace: glued or in its header, a line of the preamble, the trace's title, the reference level. Otherwise a question. */
 export function decideLevelUnit(notebook: Notebook, { unitText, name, preamble, rows, levelAt, middle }: { unitText: string; name: string; preamble: Preamble; rows: RowsShown; levelAt: (frequency: number) => number; middle: number }): DeclaredLevelUnit {
   const show = (unit: DeclaredLevelUnit): string => rows.level.map((value) => `${value} ${unit}`).join('\n');
   const own = levelUnitIn(unitText);
   const stated = levelUnitByPreamble(preamble);
   const found = own !== null ? { unit: own, how: 'the column\u2019s header or cells' } : stated;
-  if (own !== null && stated !== null && stated.unit !== own && entryOf(preamble, 'levelUnit') !== null) {
-    return settle(notebook, askConflict(notebook, { id: 'level-unit', lines: rows.lines, show }, [{ unit: own, how: 'the column\u2019s header or cells' }, stated]));
+  if (own !== null && isContradicted(own, stated, preamble)) {
+    return settle(notebook, askConflict(notebook, { id: 'level-unit', lines: rows.lines, show }, [{ unit: own, how: 'the column\u2019s header or cells' }, ...(stated === null ? [] : [stated])]));
   }
   if (found === null) {
     const unit = ask(notebook, { id: 'level-unit', code: 'unit-missing', message: `The file does not tell the unit of "${name}".`, lines: rows.lines, choices: choices.map((id) => ({ id, label: id, sample: show(id) })) });
@@ -157,8 +172,8 @@ export function decideLevelUnit(notebook: Notebook, { unitText, name, preamble, 
     doubt(notebook, { code: 'unit-contradicted', weight: 'doubt', message: `The declared unit ${found.unit} and the marker of the preamble are 107 dB apart.` });
     return settle(notebook, askConflict(notebook, { id: 'level-unit', lines: rows.lines, show }, [found, { unit: 'dB\u00b5V', how: 'the marker, 107 dB away' }]));
   }
-  if (found.unit === 'dBm' && middle > 60) {
-    const unit = ask(notebook, { id: 'level-unit', code: 'implausible-level', message: `"${name}" is declared in dBm, and its values lie around ${middle.toFixed(0)}: that is more power than any analyzer bears.`, lines: rows.lines, choices: [found.unit, 'dB\u00b5V' as const].map((id) => ({ id, label: id, sample: show(id) })) });
+  if (found.unit === 'dBm' && isImplausible(middle, rows.level)) {
+    const unit = ask(notebook, { id: 'level-unit', code: 'implausible-level', message: `"${name}" is declared in dBm, and its values lie around ${Number(middle.toPrecision(3))}: no level in dBm is like that.`, lines: rows.lines, choices: [found.unit, 'dB\u00b5V' as const, 'mW' as const, 'V' as const].map((id) => ({ id, label: id, sample: show(id) })) });
     return settle(notebook, { unit, how: 'a person\u2019s answer' });
   }
   return settle(notebook, found);

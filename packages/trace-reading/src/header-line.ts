@@ -18,7 +18,7 @@ const levelWord = /ampl|level|pegel|niveau|power|leistung|puissance|magnitude|^m
 const indexWord = /^(?:no|nr|n|index|idx|point|points|punkt|row|zeile|ligne|i|num|lfd nr|pos)$/;
 const timeWord = /^(?:time|zeit|temps|t)\b/;
 const phaseWord = /phase|deg|winkel|angle|\bphi\b/;
-const limitWord = /limit|grenz|mask|limite|threshold/;
+const limitWord = /limit|margin|abstand|marge|grenz|mask|limite|threshold/;
 
 /** What a column's name says of it. */
 export type NamedRole = 'frequency' | 'level' | 'index' | 'time' | 'phase' | 'limit' | null;
@@ -40,7 +40,7 @@ export function roleOfName(name: string): NamedRole {
 
 function cellsOf(text: string, { delimiter }: Separators): string[] {
   const bare = withoutCommentSign(text).replace(/^(?:DATA|FORMAT|COLUMNS?)\s+(?=\S)/i, '');
-  const cells = splitCells(bare, delimiter);
+  const cells = splitCells(delimiter === ' ' ? bare.replace(/\s+(?=[[(])/g, '') : bare, delimiter);
   if (cells.length > 1 || delimiter === ' ') return cells.map((cell) => cell.trim().replace(/^"(.*)"$/, '$1'));
   return (/\t/.test(bare) ? bare.split('\t') : bare.split(/\s*[,;]\s*|\s{2,}/)).map((cell) => cell.trim());
 }
@@ -61,7 +61,7 @@ function namesColumns(roles: readonly NamedRole[], width: number): boolean {
 }
 
 function isHeader(cells: readonly string[], width: number, { decimalMark }: Separators): boolean {
-  if (cells.length < Math.max(Math.min(2, width), width - 1) || cells.length > width + 1) return false;
+  if (cells.length < Math.max(Math.min(2, width), width - 1) || (cells.length > width + 1 && !cells.slice(0, width).some((cell) => roleOfName(cell) === 'frequency'))) return false;
   if (cells.some((cell) => ['number', 'no value'].includes(readCell(cell, decimalMark).kind) || /[:=]\s*\S/.test(cell))) return false;
   const roles = cells.map(roleOfName);
   return !isKeyWithValue(cells, roles) && namesColumns(roles, width);

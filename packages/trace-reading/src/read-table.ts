@@ -3,7 +3,7 @@ import { checkPointCount, checkRange } from './check-counts.js';
 import { chooseBlocks } from './choose-blocks.js';
 import { chooseSeparators } from './choose-separators.js';
 import { decideColumns, type TraceColumn } from './column-roles.js';
-import { findDataBlocks, type DataBlock } from './data-blocks.js';
+import { findDataBlocks, strayUnitRefusal, type DataBlock } from './data-blocks.js';
 import { decideFrequencyUnit, decideLevelUnit } from './decide-units.js';
 import { axisOfColumn, axisOfRange } from './frequency-axis.js';
 import { findHeader, type Header } from './header-line.js';
@@ -18,7 +18,7 @@ import type { SweepSettings } from './sweep.js';
 import { settingsOf, traceModeIn } from './sweep-settings.js';
 import { sweepFromPoints } from './sweep-from-points.js';
 import type { TextLines } from './text-lines.js';
-import type { DeclaredLevelUnit } from './unit-words.js';
+import { frequencyUnitOf, levelUnitOf, type DeclaredLevelUnit } from './unit-words.js';
 import type { ReadSweep } from './transcription.js';
 
 /** Reads a table of rows: separators, blocks, columns, units, axis, sweeps. */
@@ -87,6 +87,8 @@ function axisOf(notebook: Notebook, { block, preamble }: BlockToRead, frequencyC
   const finite = column.filter((value) => Number.isFinite(value));
   const values = [valueAt(finite, 0), valueAt(finite, finite.length - 1)];
   const unit = decideFrequencyUnit(notebook, { headerText: headerTextOf(block, header, frequencyColumn), values, preamble, range, rows: { ...rowsShown(block, frequencyColumn, 0), count: block.rowCount } });
+  const stray = block.strayUnits.find((one) => one.column === frequencyColumn && frequencyUnitOf(one.unit) !== unit);
+  if (stray !== undefined) throw strayUnitRefusal(stray);
   return axisOfColumn(column, unit);
 }
 
@@ -119,7 +121,10 @@ function unitOfTrace(notebook: Notebook, { block, preamble }: BlockToRead, trace
   }
   const finite = level.filter(Number.isFinite).sort();
   const levelAt = (frequency: number): number => valueAt(level, block.columns[0]?.indexOf(frequency) ?? -1);
-  return decideLevelUnit(notebook, { unitText: trace.unitText, name: trace.name, preamble, rows: rowsShown(block, null, trace.column), levelAt, middle: valueAt(finite, finite.length >> 1) });
+  const unit = decideLevelUnit(notebook, { unitText: trace.unitText, name: trace.name, preamble, rows: rowsShown(block, null, trace.column), levelAt, middle: valueAt(finite, finite.length >> 1) });
+  const stray = block.strayUnits.find((one) => one.column === trace.column && levelUnitOf(one.unit) !== unit);
+  if (stray !== undefined) throw strayUnitRefusal(stray);
+  return unit;
 }
 
 function readTrace(notebook: Notebook, toRead: BlockToRead, { trace, place, frequencyHz, settings, impedanceOhm, count }: TraceToRead): ReadSweep {

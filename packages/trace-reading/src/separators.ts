@@ -18,6 +18,8 @@ export const delimiterNames: Readonly<Record<Delimiter, string>> = { '\t': 'tab'
 
 /** A line with quoted cells, as people's spreadsheets write them. */
 function splitQuoted(line: string, delimiter: string): string[] {
+  const plain = line.split(delimiter);
+  if (plain.every((cell) => (cell.split('"').length - 1) % 2 === 0)) return plain.map((cell) => cell.trim().replaceAll('"', ''));
   return Papa.parse<string[]>(line, { delimiter, skipEmptyLines: false }).data[0] ?? [];
 }
 

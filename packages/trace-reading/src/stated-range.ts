@@ -1,6 +1,7 @@
-import type { FrequencyUnit } from '@leeside/units/frequency-unit';
+import { frequencyHzFrom, type FrequencyUnit } from '@leeside/units/frequency-unit';
 import { entryOf, type Preamble } from './preamble.js';
 import { frequencyValue, leadingNumber } from './quantity.js';
+import { frequencyUnitIn } from './unit-words.js';
 
 /** Start, stop and number of points as the preamble states them. */
 export interface StatedRange {
@@ -13,7 +14,9 @@ export interface StatedRange {
 
 function frequency(preamble: Preamble, key: 'start' | 'stop' | 'center' | 'span'): ReturnType<typeof frequencyValue> {
   const entry = entryOf(preamble, key);
-  return entry === null ? null : frequencyValue(entry.value, entry.keyText);
+  const found = entry === null ? null : frequencyValue(entry.value, entry.keyText);
+  const unit = found === null || found.unit !== null ? null : frequencyUnitIn(entryOf(preamble, 'frequencyUnit')?.value ?? '');
+  return found === null || unit === null ? found : { ...found, unit, hz: frequencyHzFrom(found.value, unit) };
 }
 
 /** The range by start and stop, else by centre and span; null where neither is told. */

@@ -1,7 +1,7 @@
 import { valueAt } from '@leeside/units/value-at';
 import { decibelsFromFieldRatio } from '@leeside/units/decibels';
 import { levelDbmFrom, type KeptLevelUnit } from '@leeside/units/level-unit';
-import { doubt, type Notebook } from './notebook.js';
+import { ask, doubt, type Notebook } from './notebook.js';
 import { orderPoints, type LoosePoints } from './order-points.js';
 import { refuse } from './reading-fault.js';
 import { makeSweep, type Sweep, type SweepSettings } from './sweep.js';
@@ -55,7 +55,10 @@ function noteMissing(notebook: Notebook, points: LoosePoints, kept: Uint32Array)
   if (missing === 0) return;
   const place = kept.findIndex((at, order) => at !== order);
   const line = valueAt(points.lines, place < 0 ? kept.length : place) + 1;
-  doubt(notebook, { code: 'no-value', weight: missing > mostMissing * points.level.length ? 'doubt' : 'note', message: `${missing} point${missing === 1 ? ' has' : 's have'} no value (first: line ${line}).`, line });
+  const message = `${missing} point${missing === 1 ? ' has' : 's have'} no value (first: line ${line}).`;
+  const isMany = missing > mostMissing * points.level.length && missing > 1;
+  doubt(notebook, { code: 'no-value', weight: isMany ? 'doubt' : 'note', message, line });
+  if (isMany) ask(notebook, { id: 'gaps', code: 'many-gaps', message, lines: [line], choices: [{ id: 'leave-out', label: 'leave these points out', sample: `${kept.length} points of ${points.level.length}` }] });
 }
 
 /** Makes a sweep: values that the analyzer marked as none become gaps that are said, levels are converted and rounded to float32. */

@@ -4,6 +4,7 @@ import { decide, type Notebook } from './notebook.js';
 import { refuse } from './reading-fault.js';
 import { splitCells, type Delimiter } from './separators.js';
 import { lineAt, splitLines, type TextLines } from './text-lines.js';
+import { frequencyUnitOf, levelUnitOf } from './unit-words.js';
 
 const delimiters: readonly Delimiter[] = ['\t', ';', ',', '|'];
 const fewestValues = 4;
@@ -15,7 +16,10 @@ interface NamedRow {
 
 /** A line that is a name followed by numbers alone. */
 function namedRow(text: string, delimiter: Delimiter, mark: '.' | ','): NamedRow | null {
-  const [name = '', ...cells] = splitCells(text, delimiter);
+  const [first = '', second = '', ...rest] = splitCells(text, delimiter);
+  const hasUnit = frequencyUnitOf(second) !== null || levelUnitOf(second) !== null;
+  const name = hasUnit ? `${first} [${second.trim()}]` : first;
+  const cells = hasUnit ? rest : [second, ...rest];
   if (cells.length < fewestValues || !/\p{L}/u.test(name) || readCell(name, mark).kind === 'number') return null;
   return cells.every((cell) => readCell(cell, mark).kind === 'number') ? { name: name.trim(), cells } : null;
 }
