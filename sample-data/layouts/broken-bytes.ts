@@ -1,3 +1,4 @@
+import { decibelsFromPowerRatio } from '@leeside/units/decibels';
 import type { Fixture } from './fixture.js';
 import { joined, latin1, utf8 } from './encode-text.js';
 
@@ -28,7 +29,7 @@ export const brokenBytes: readonly Fixture[] = [
   refused('full-width-digits.csv', 'bad-number', () => utf8(good.replace('2000,-51', '\uff12\uff10\uff10\uff10,-51')), 3),
   refused('arabic-digits.csv', 'bad-number', () => utf8(good.replace('2000,-51', '2000,-\u0665\u0661')), 3),
   { file: 'japanese-names.csv', bytes: () => joined([0x8e, 0xfc, 0x94, 0x67, 0x90, 0x94], ' [Hz],', [0x83, 0x8c, 0x83, 0x78, 0x83, 0x8b], ' [dBm]\n1000,-50\n2000,-51\n'), expected: { kind: 'question', code: 'encoding' } },
-  { file: 'western-signs.csv', bytes: () => latin1('# 23 \u00b0C, pr\u00fcfung\nFrequency [Hz],Level [dB\u00b5V]\n1000,57\n2000,56\n'), expected: { kind: 'read', sweeps: [{ unit: 'dBm', frequencyHz: [1000, 2000], level: [57, 56].map((dbuv) => dbuv - 120 + 10 * Math.log10(20)) }], doubts: ['not-utf-8', 'converted-at-impedance'] } },
+  { file: 'western-signs.csv', bytes: () => latin1('# 23 \u00b0C, pr\u00fcfung\nFrequency [Hz],Level [dB\u00b5V]\n1000,57\n2000,56\n'), expected: { kind: 'read', sweeps: [{ unit: 'dBm', frequencyHz: [1000, 2000], level: [57, 56].map((dbuv) => dbuv - 120 + decibelsFromPowerRatio(20)) }], doubts: ['not-utf-8', 'converted-at-impedance'] } },
   { file: 'harmless-test-string.csv', bytes: () => joined('# X5O!P%@AP[4]\n', good), expected: { kind: 'read', sweeps: [{ unit: 'dBm', frequencyHz: [1000, 2000, 3000], level: [-50, -51, -52.5] }] } },
   { ...refused('one-endless-line.csv', 'line-too-long', () => new Uint8Array(20 * mebibyte).fill(0x31), 1), isBig: true },
   { ...refused('too-large.csv', 'too-large', () => new Uint8Array(64 * mebibyte + 1).fill(0x0a)), isBig: true },

@@ -1,3 +1,4 @@
+import { powerOfTen } from '@leeside/units/logarithm';
 import type { Fixture } from './fixture.js';
 import { utf16, utf8 } from './encode-text.js';
 import { axisHz, dbmSweep, kept, levels, withMark } from './true-sweep.js';
@@ -9,7 +10,7 @@ const sweeps = [dbmSweep(frequencyHz, level)];
 const column = (mark: '.' | ',' = '.'): string => level.map((value) => `${withMark(value, mark)}\n`).join('');
 const good = (file: string, text: string): Fixture => ({ file, bytes: () => utf8(text), expected: { kind: 'read', sweeps } });
 const dbuv = level.map((value) => Math.round((value + 107) * 100) / 100);
-const decades = Array.from({ length: 61 }, (_, at) => 1e6 * 10 ** (at / 20));
+const decades = Array.from({ length: 61 }, (_, at) => 1e6 * powerOfTen(at / 20));
 
 /** Levels without a frequency column: start and stop, or centre and span, and the number of points stand before them. */
 export const levelsAlone: readonly Fixture[] = [

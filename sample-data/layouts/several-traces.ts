@@ -1,3 +1,4 @@
+import { decibelsFromFieldRatio } from '@leeside/units/decibels';
 import type { Fixture } from './fixture.js';
 import { utf8 } from './encode-text.js';
 import { axisHz, dbmSweep, kept, levels, withMark, written } from './true-sweep.js';
@@ -46,6 +47,6 @@ export const severalTraces: readonly Fixture[] = [
   },
   {
     file: 'real-and-imaginary.csv', bytes: () => utf8(`! a cable\n!\nBEGIN CH1_DATA\nFreq(Hz),"S21"(REAL),"S21"(IMAG)\n${frequencyHz.map((hz) => `${hz},3.0e-3,4.0e-3\n`).join('')}END\n`),
-    expected: { kind: 'read', sweeps: [{ unit: 'dB', frequencyHz, level: frequencyHz.map(() => 20 * Math.log10(Math.hypot(3e-3, 4e-3))) }] },
+    expected: { kind: 'read', sweeps: [{ unit: 'dB', frequencyHz, level: frequencyHz.map(() => decibelsFromFieldRatio(Math.hypot(3e-3, 4e-3))) }] },
   },
 ];

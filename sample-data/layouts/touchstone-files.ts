@@ -1,10 +1,11 @@
+import { decibelsFromFieldRatio } from '@leeside/units/decibels';
 import type { Fixture } from './fixture.js';
 import { latin1, utf8 } from './encode-text.js';
 import type { TrueSweep } from './true-sweep.js';
 
 const axis = [1e9, 1.5e9, 2e9];
 const db = (frequencyHz: readonly number[], level: readonly number[]): TrueSweep => ({ unit: 'dB', frequencyHz, level });
-const voltageDb = (ratio: number): number => 20 * Math.log10(ratio);
+const voltageDb = (ratio: number): number => decibelsFromFieldRatio(ratio);
 const good = (file: string, text: string, sweeps: readonly TrueSweep[], doubts?: readonly string[]): Fixture => ({ file, bytes: () => utf8(text), expected: { kind: 'read', sweeps, ...(doubts === undefined ? {} : { doubts }) } });
 /** A whole matrix of n ports in dB, element row.column at −(10·row + column) dB, an angle of 0. */
 const matrixRow = (ports: number, row: number): string => Array.from({ length: ports }, (_, at) => `-${row}${at + 1}.5 0`).join(' ');
