@@ -13,7 +13,7 @@ export const helpText = `leeside: send sweep files from the bench, and see how t
   --json                             machine-readable output, with every command
   --help                             this text
 
-The token: sign in with the browser, "My tokens", make one. LEESIDE_URL and LEESIDE_TOKEN in the environment
+The token: sign in with the browser, "Tokens", make one. LEESIDE_URL and LEESIDE_TOKEN in the environment
 go before what login kept.
 
 Exit code: 0 done · 1 failed · 2 a file needs an answer · 3 a file was refused · 64 wrong use

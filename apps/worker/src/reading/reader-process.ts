@@ -22,6 +22,9 @@ async function read(request: ReadingRequest): Promise<ReadingAnswer> {
 }
 
 process.on('message', (request: ReadingRequest) => {
-  void read(request).then((answer) => process.send?.(answer));
+  void read(request).then((answer) => process.send?.(answer, undefined, undefined, (fault) => {
+    // The worker is gone: nobody waits for the answer.
+    if (fault !== null) process.exit(1);
+  }));
 });
 process.on('disconnect', () => process.exit(0));
