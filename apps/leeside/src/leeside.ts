@@ -1,9 +1,11 @@
 #!/usr/bin/env node
 import { parseArgs } from 'node:util';
+import { measuringRoles } from '@leeside/contracts/measuring-roles';
 import { listSessions } from '@leeside/contracts/sessions';
 import { readConnection } from './configuration.js';
 import { CommandFault, exitCode } from './exit-code.js';
 import { helpText } from './help-text.js';
+import { listenForInterruptions } from './interruptions.js';
 import { login } from './login-command.js';
 import { codeOfReading, describeReading, readLocally } from './read-command.js';
 import { sendFolder } from './send-command.js';
@@ -25,18 +27,18 @@ function needed(value: string | undefined, what: string): string {
 }
 
 async function runSend(folder: string | undefined, options: Options): Promise<number> {
-  let isStopped = false;
-  process.once('SIGINT', () => {
-    isStopped = true;
-    say('Stopping after what is under way. Ctrl-C again ends at once.');
-  });
-  const report = await sendFolder(await readConnection(), {
-    folder: needed(folder, 'The folder'), sessionId: needed(options.session, '--session ID'), watch: options.watch, say, stopped: () => isStopped,
-    ...(options.role === undefined ? {} : { role: options.role }),
+  const { stopping, leaving } = listenForInterruptions(say);
+  const { role } = options;
+  if (role !== undefined && !measuringRoles.some((one) => one === role)) throw new CommandFault(`"${role}" is no role: ${measuringRoles.join(', ')}.`, exitCode.wrongUse);
+  const report = await sendFolder({ ...(await readConnection()), leaving }, {
+    folder: needed(folder, 'The folder'), sessionId: needed(options.session, '--session ID'), watch: options.watch, say, stopping,
+    ...(role === undefined ? {} : { role }),
     ...(options.sample === undefined ? {} : { sampleCode: options.sample }),
     ...(options.condition === undefined ? {} : { condition: options.condition }),
   });
-  print(options.json ? JSON.stringify(report.files) : report.files.map((file) => `${file.state}\t${file.name}${file.problem ? `\t${file.problem}` : ''}`).join('\n'));
+  if (options.json) print(JSON.stringify(report.files));
+  else if (report.files.length === 0) say('No file was sent.');
+  else print(report.files.map((file) => `${file.state}\t${file.name}${file.problem ? `\t${file.problem}` : ''}`).join('\n'));
   return report.code;
 }
 
@@ -54,8 +56,7 @@ async function runSessions(options: Options): Promise<number> {
 
 async function runCurve(id: string | undefined, options: Options): Promise<number> {
   const path = `/curves/${encodeURIComponent(needed(id, 'The id of the curve'))}${options.csv ? '.csv' : ''}`;
-  const response = await callServer(await readConnection(), path);
-  print(await response.text());
+  print(await callServer(await readConnection(), path));
   return exitCode.done;
 }
 

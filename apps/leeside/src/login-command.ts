@@ -1,6 +1,6 @@
 import { createInterface } from 'node:readline/promises';
 import { getMe } from '@leeside/contracts/authentication';
-import { keepConnection, tokenFromEnvironment } from './configuration.js';
+import { checkConnection, keepConnection, tokenFromEnvironment } from './configuration.js';
 import { CommandFault } from './exit-code.js';
 import { askServer } from './server-call.js';
 
@@ -16,7 +16,7 @@ async function askForToken(): Promise<string> {
 
 /** Checks a token against the server and keeps both for the commands to come. */
 export async function login(url: string): Promise<string> {
-  const connection = { url, token: await askForToken() };
+  const connection = checkConnection({ url, token: await askForToken() });
   const { user } = await askServer(connection, '/auth/me', getMe.answers[200]);
   const file = await keepConnection(connection);
   return `Signed in as ${user.name} (${user.roles.join(', ')}) of ${user.labName}. Kept in ${file}.`;
